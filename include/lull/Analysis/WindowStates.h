@@ -1,0 +1,66 @@
+//===- WindowStates.h - What waiting qubits hold ----------------*- C++ -*-===//
+//
+// Part of the Lull project, under the Apache License v2.0 with LLVM Exceptions.
+// See LICENSE for license information.
+// SPDX-License-Identifier: Apache-2.0 WITH LLVM-exception
+//
+//===----------------------------------------------------------------------===//
+
+#ifndef LULL_ANALYSIS_WINDOWSTATES_H
+#define LULL_ANALYSIS_WINDOWSTATES_H
+
+#include "lull/Analysis/TimedProgram.h"
+
+#include <vector>
+
+namespace lull {
+
+/// What gates do to computational basis states, by their standard names.
+enum class BasisAction : std::uint8_t {
+  /// Not known to keep any: the outcome counts as a state that matters.
+  Unknown,
+  /// Diagonal (z, s, t, rz, p, cz, cp, ...): every qubit keeps what it has, and
+  /// Z errors pass through to the same qubit.
+  Diagonal,
+  /// One qubit, basis states to basis states (x, y).
+  Flip,
+  /// All but the last qubit are controls; the last is flipped (cx, ccx).
+  ControlledFlip,
+  /// The two qubits exchange what they have (swap, iswap).
+  Exchange,
+};
+BasisAction basisAction(llvm::StringRef gate);
+
+/// What each qubit holds just before each operation on it and at the end, by a
+/// dataflow over the whole function: forward whether it is in a basis state,
+/// backward whether it will only be measured or reset. Qubits start in a basis
+/// state and, at the end, are still wanted unless `spentAtEnd`.
+class WindowStates {
+public:
+  WindowStates(const TimedProgram &program, bool spentAtEnd);
+
+  /// What the qubit holds while it waits for operation `after`, one of whose
+  /// qubits it is; at the end of the function for NoOp.
+  WindowState before(OpId after, ResourceId qubit) const;
+
+private:
+  struct Facts {
+    bool basis : 1;
+    bool spent : 1;
+  };
+  static WindowState stateOf(Facts facts);
+  void forward();
+  void backward(bool spentAtEnd);
+
+  const TimedProgram &program;
+  /// By operation and, in it, by qubit; `first[op]` is where op's begin.
+  std::vector<Facts> facts;
+  std::vector<std::uint32_t> first;
+  /// By qubit.
+  std::vector<Facts> atEnd;
+  std::vector<BasisAction> actions;
+};
+
+} // namespace lull
+
+#endif // LULL_ANALYSIS_WINDOWSTATES_H

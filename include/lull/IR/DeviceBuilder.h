@@ -1,0 +1,37 @@
+//===- DeviceBuilder.h - From the device op to the plain device --*- C++
+//-*-===//
+//
+// Part of the Lull project, under the Apache License v2.0 with LLVM Exceptions.
+// See LICENSE for license information.
+// SPDX-License-Identifier: Apache-2.0 WITH LLVM-exception
+//
+//===----------------------------------------------------------------------===//
+
+#ifndef LULL_IR_DEVICEBUILDER_H
+#define LULL_IR_DEVICEBUILDER_H
+
+#include "lull/IR/Ops.h"
+#include "lull/Timing/Device.h"
+
+namespace lull {
+
+/// The plain device of a `lull.device` op; the one place that converts it. On
+/// failure errors stand at the line of the device op that is wrong (none are
+/// emitted if `quiet`).
+mlir::FailureOr<Device> buildDevice(DeviceOp op, bool quiet = false);
+
+/// The device that an operation (a function, say) runs on, by the attribute
+/// `lull.device` of it or of the nearest ancestor that has one. Null if there
+/// is no such attribute, or its symbol is no device (an error is emitted in the
+/// latter case).
+DeviceOp lookupDevice(mlir::Operation *op);
+
+/// Whether a device can run what a function says: sites exist, pairs are
+/// coupled, durations are on the clock. Emits an error at each operation that
+/// breaks it, up to a few.
+llvm::LogicalResult verifyAgainstDevice(mlir::Operation *function,
+                                        const Device &device);
+
+} // namespace lull
+
+#endif // LULL_IR_DEVICEBUILDER_H

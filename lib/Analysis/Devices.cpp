@@ -1,0 +1,66 @@
+//===- Devices.cpp - The devices of a module, converted once ----*- C++ -*-===//
+//
+// Part of the Lull project, under the Apache License v2.0 with LLVM Exceptions.
+// See LICENSE for license information.
+// SPDX-License-Identifier: Apache-2.0 WITH LLVM-exception
+//
+//===----------------------------------------------------------------------===//
+
+#include "lull/Analysis/Devices.h"
+
+#include "mlir/Interfaces/FunctionInterfaces.h"
+
+using namespace lull;
+using namespace mlir;
+
+SmallVector<Operation *> lull::timedFunctions(Operation *root) {
+  SmallVector<Operation *> functions;
+  root->walk<WalkOrder::PreOrder>([&](Operation *op) {
+    if (!isa<FunctionOpInterface>(op))
+      return WalkResult::advance();
+    bool timed = op->walk([](TimedOpInterface) {
+                     return WalkResult::interrupt();
+                   }).wasInterrupted();
+    if (timed)
+      functions.push_back(op);
+    return WalkResult::skip();
+  });
+  return functions;
+}
+
+Devices::Devices(Operation *module) {
+  SymbolTableCollection symbols;
+  for (Operation *function : timedFunctions(module)) {
+    Operation *at = function;
+    FlatSymbolRefAttr symbol;
+    for (; at && !symbol; at = at->getParentOp())
+      symbol =
+          at->getAttrOfType<FlatSymbolRefAttr>(LullDialect::deviceAttrName);
+    if (!symbol)
+      continue;
+    auto op = symbols.lookupNearestSymbolFrom<DeviceOp>(function, symbol);
+    if (!op) {
+      function->emitError("unknown device ") << symbol;
+      reported.insert(function);
+      continue;
+    }
+    auto [place, isNew] = byOp.try_emplace(op);
+    if (isNew)
+      if (FailureOr<Device> device = buildDevice(op); succeeded(device))
+        place->second = std::make_unique<Device>(std::move(*device));
+    if (place->second)
+      byFunction[function] = place->second.get();
+    else
+      reported.insert(function);
+  }
+}
+
+const Device *Devices::of(Operation *function) const {
+  return byFunction.lookup(function);
+}
+
+void Devices::explain(Operation *function) const {
+  if (!reported.contains(function))
+    function->emitError("runs on no device: name one by the attribute "
+                        "'lull.device' or with lull-use-device");
+}

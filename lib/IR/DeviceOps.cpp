@@ -1,0 +1,90 @@
+//===- DeviceOps.cpp - Operations that describe devices and sequences --*- C++
+//-*-===//
+//
+// Part of the Lull project, under the Apache License v2.0 with LLVM Exceptions.
+// See LICENSE for license information.
+// SPDX-License-Identifier: Apache-2.0 WITH LLVM-exception
+//
+//===----------------------------------------------------------------------===//
+
+#include "lull/IR/Assembly.h"
+#include "lull/IR/DeviceBuilder.h"
+#include "lull/IR/Ops.h"
+
+#include "mlir/IR/DialectImplementation.h"
+
+using namespace lull;
+using namespace mlir;
+
+#define GET_OP_CLASSES
+#include "lull/IR/LullDeviceOps.cpp.inc"
+
+LogicalResult DeviceOp::verifyRegions() {
+  for (Operation &line : getBody().front())
+    if (!isa<SiteOp, CouplerOp, OperationOp>(line)) {
+      InFlightDiagnostic diag =
+          line.emitOpError("has no place in a device: there are lull.site, "
+                           "lull.coupler and lull.operation");
+      diag.attachNote(getLoc()) << "the device";
+      return diag;
+    }
+  // Everything else is a rule of the plain device, which names what is wrong.
+  return success(succeeded(buildDevice(*this)));
+}
+
+LogicalResult OperationOp::verify() {
+  int64_t arity = getArity();
+  if (arity < 1)
+    return emitOpError() << "is for " << arity
+                         << " qubits when it should be for one or more";
+  if (getOn().size() % arity)
+    return emitOpError() << "lists " << getOn().size()
+                         << " sites, which is no multiple of its " << arity
+                         << " qubits";
+  if (getSymmetric() && arity != 2)
+    return emitOpError() << "is symmetric with " << arity
+                         << " qubits when only pairs can be";
+  if (getLabel().empty())
+    return emitOpError("has an empty name");
+  return success();
+}
+
+LogicalResult SequenceOp::verify() {
+  // Larger numbers say nothing that hardware could follow and would overflow
+  // the exact arithmetic of repeats.
+  constexpr int64_t most = 1000000;
+  size_t count = getPhases().size();
+  if (count == 0)
+    return emitOpError("has no pulses");
+  if (bool(getInstants()) == bool(getFormula()))
+    return emitOpError("has its instants either as fractions or by a formula");
+  for (auto [index, phase] :
+       llvm::enumerate(getPhases().getAsRange<FractionAttr>()))
+    if (Fraction value = phase.getValue(); value.denominator() > most ||
+                                           value > Fraction(most) ||
+                                           value < Fraction(-most))
+      return emitOpError() << "phase " << value.str() << " of pulse "
+                           << index + 1 << " goes beyond " << most;
+  if (!getInstants())
+    return success();
+  if (getInstants()->size() != count)
+    return emitOpError() << "has " << count << " phases and "
+                         << getInstants()->size() << " instants";
+  Fraction previous = 0;
+  for (auto [index, instant] :
+       llvm::enumerate(getInstants()->getAsRange<FractionAttr>())) {
+    Fraction value = instant.getValue();
+    if (value.denominator() > most)
+      return emitOpError() << "instant " << value.str() << " of pulse "
+                           << index + 1 << " goes beyond 1/" << most;
+    if (value < Fraction(0) || value > Fraction(1))
+      return emitOpError() << "instant " << value.str() << " of pulse "
+                           << index + 1 << " is outside the window, 0 to 1";
+    if (value < previous)
+      return emitOpError() << "instant " << value.str() << " of pulse "
+                           << index + 1 << " is before " << previous.str()
+                           << ", the one of pulse " << index;
+    previous = value;
+  }
+  return success();
+}

@@ -1,0 +1,275 @@
+//===- Assign.cpp - lull-assign ---------------------------------*- C++ -*-===//
+//
+// Part of the Lull project, under the Apache License v2.0 with LLVM Exceptions.
+// See LICENSE for license information.
+// SPDX-License-Identifier: Apache-2.0 WITH LLVM-exception
+//
+//===----------------------------------------------------------------------===//
+
+#include "lull/Analysis/Devices.h"
+#include "lull/Analysis/Timeline.h"
+#include "lull/Transforms/Functions.h"
+#include "lull/Transforms/Passes.h"
+#include "lull/Transforms/Plans.h"
+
+#include <fmt/format.h>
+
+namespace lull {
+#define GEN_PASS_DEF_LULLASSIGN
+#include "lull/Transforms/Passes.h.inc"
+} // namespace lull
+
+using namespace lull;
+using namespace mlir;
+
+namespace {
+
+/// What the options ask for.
+struct Policy {
+  /// The sequence for windows without a wish; null for none.
+  Attribute sequence;
+  unsigned repeats = 1;
+  bool alternating = false;
+  std::optional<Duration> spacing, leastWindow;
+  bool alsoBasis = false;
+  bool alsoSpent = false;
+};
+
+struct AssignPass : public lull::impl::LullAssignBase<AssignPass> {
+  using LullAssignBase::LullAssignBase;
+
+  LogicalResult initialize(MLIRContext *context) override;
+  void runOnOperation() override;
+
+private:
+  LogicalResult checkSequences();
+
+  Policy policy;
+};
+
+/// A window that is to be decided.
+struct Window {
+  TimedOpInterface op;
+  SiteId site;
+  Ticks start;
+  Ticks length;
+};
+
+/// Decides the windows of one function.
+class Decider {
+public:
+  Decider(const Policy &policy, const Timeline &timeline, Remarks &remarks)
+      : policy(policy), program(timeline.read()), device(program.device()),
+        remarks(remarks), plans(device, program.function()),
+        protectName(StringAttr::get(program.function()->getContext(),
+                                    LullDialect::protectAttrName)) {}
+
+  /// Turns options into ticks of this device.
+  LogicalResult prepare();
+  LogicalResult decide(const Window &window);
+
+private:
+  LogicalResult decideByWish(const Window &window, Attribute wish);
+  /// Puts the plan on the window if it fits.
+  LogicalResult tryPlan(const Window &window, PlanAttr plan);
+  /// A plan of `sequence` with the repeats that the options ask for.
+  FailureOr<PlanAttr> makePlan(const Window &window, Attribute sequence);
+  void leave(const Window &window, const std::string &why);
+  LogicalResult fail(const Window &window, llvm::Error error) {
+    return window.op->emitError(llvm::toString(std::move(error)));
+  }
+  std::string ticks(Ticks count) const {
+    return device.clock().describe(count);
+  }
+
+  const Policy &policy;
+  const TimedProgram &program;
+  const Device &device;
+  Remarks &remarks;
+  Plans plans;
+  StringAttr protectName;
+  Ticks spacing = 0;
+  Ticks least = 0;
+};
+
+} // namespace
+
+//===----------------------------------------------------------------------===//
+// One window
+//===----------------------------------------------------------------------===//
+
+LogicalResult Decider::prepare() {
+  for (auto [option, slot] : {std::pair(&policy.spacing, &spacing),
+                              std::pair(&policy.leastWindow, &least)}) {
+    if (!*option)
+      continue;
+    llvm::Expected<Ticks> value = device.clock().toTicks(**option);
+    if (!value)
+      return program.function()->emitError("in an option of lull-assign: ")
+             << llvm::toString(value.takeError());
+    *slot = *value;
+  }
+  return success();
+}
+
+void Decider::leave(const Window &window, const std::string &why) {
+  if (!remarks.wanted())
+    return;
+  remarks.missed(window.op->getLoc(), "Left",
+                 fmt::format("window of {} on site {} left: {}",
+                             ticks(window.length), window.site, why),
+                 {{"Site", std::to_string(window.site)},
+                  {"Start", std::to_string(window.start)},
+                  {"Length", std::to_string(window.length)}});
+}
+
+FailureOr<PlanAttr> Decider::makePlan(const Window &window,
+                                      Attribute sequence) {
+  unsigned repeats = policy.repeats;
+  if (policy.spacing) {
+    llvm::Expected<const Sequence *> base = plans.base(sequence);
+    if (!base)
+      return fail(window, base.takeError());
+    // The largest number of repeats whose pulses are `spacing` apart on
+    // average, so that length / (repeats * pulses) >= spacing.
+    Ticks apart = spacing * Ticks((*base)->size());
+    repeats = unsigned(std::max<Ticks>(1, window.length / apart));
+  }
+  return PlanAttr::get(program.function()->getContext(), sequence, repeats,
+                       policy.alternating);
+}
+
+LogicalResult Decider::tryPlan(const Window &window, PlanAttr plan) {
+  llvm::Expected<Player *> player = plans.player(plan, window.site);
+  if (!player)
+    return fail(window, player.takeError());
+  GridWindow grid = plans.window(window.start, window.length);
+  Ticks needed = (*player)->least(grid);
+  if (needed > window.length) {
+    leave(window, fmt::format("{} needs {}", (*player)->sequence().name,
+                              ticks(needed)));
+    return success();
+  }
+  TimedOpInterface(window.op).setWindowPlan(plan);
+  return success();
+}
+
+LogicalResult Decider::decideByWish(const Window &window, Attribute wish) {
+  if (auto name = dyn_cast<StringAttr>(wish); name && name == "none") {
+    leave(window, "the program asks for it");
+    return success();
+  }
+  PlanAttr plan = dyn_cast<PlanAttr>(wish);
+  if (plan)
+    return tryPlan(window, plan);
+  FailureOr<PlanAttr> made = makePlan(window, wish);
+  return failed(made) ? failure() : tryPlan(window, *made);
+}
+
+LogicalResult Decider::decide(const Window &window) {
+  TimedOpInterface op = window.op;
+  if (op.getWindowPlan())
+    return success();
+  if (Attribute wish = op->getDiscardableAttr(protectName))
+    return decideByWish(window, wish);
+  WindowState state = op.getWindowState();
+  if (!policy.sequence) {
+    leave(window, "no sequence was asked for");
+    return success();
+  }
+  if (state == WindowState::Basis && !policy.alsoBasis) {
+    leave(window, "the qubit is in a basis state, which pulses would harm");
+    return success();
+  }
+  if (state == WindowState::Spent && !policy.alsoSpent) {
+    leave(window, "the qubit is only measured or reset from here on");
+    return success();
+  }
+  if (window.length < least) {
+    leave(window, fmt::format("the least window is {}", ticks(least)));
+    return success();
+  }
+  FailureOr<PlanAttr> plan = makePlan(window, policy.sequence);
+  return failed(plan) ? failure() : tryPlan(window, *plan);
+}
+
+//===----------------------------------------------------------------------===//
+// The pass
+//===----------------------------------------------------------------------===//
+
+LogicalResult AssignPass::initialize(MLIRContext *context) {
+  Location loc = UnknownLoc::get(context);
+  policy = Policy();
+  policy.repeats = repeats;
+  policy.alternating = alternating;
+  policy.alsoBasis = alsoBasis;
+  policy.alsoSpent = alsoSpent;
+  StringRef name = sequence;
+  if (name.consume_front("@"))
+    policy.sequence = FlatSymbolRefAttr::get(context, name);
+  else if (!name.empty() && name != "none")
+    policy.sequence = StringAttr::get(context, name);
+  if (repeats == 0)
+    return emitError(loc) << "option 'repeats' is 0 when it should be 1 or "
+                             "more";
+  if (repeats != 1 && !spacing.empty())
+    return emitError(loc)
+           << "options 'repeats' and 'spacing' exclude each other";
+  for (auto [text, slot, optionName] :
+       {std::tuple(&spacing, &policy.spacing, "spacing"),
+        std::tuple(&leastWindow, &policy.leastWindow, "least-window")}) {
+    if (text->empty())
+      continue;
+    llvm::Expected<Duration> parsed = Duration::parse(*text);
+    if (!parsed)
+      return emitError(loc) << "option '" << optionName
+                            << "': " << llvm::toString(parsed.takeError());
+    if (!parsed->isSet() || parsed->amount() <= 0)
+      return emitError(loc) << "option '" << optionName << "' is '" << *text
+                            << "' when it should be a positive duration";
+    *slot = *parsed;
+  }
+  return success();
+}
+
+LogicalResult AssignPass::checkSequences() {
+  bool anyFailed = false;
+  getOperation().walk([&](SequenceOp op) {
+    if (llvm::Expected<Sequence> built = buildSequence(op); !built) {
+      op.emitError(llvm::toString(built.takeError()));
+      anyFailed = true;
+    }
+  });
+  return failure(anyFailed);
+}
+
+void AssignPass::runOnOperation() {
+  getAnalysis<Devices>();
+  if (failed(checkSequences()))
+    return signalPassFailure();
+  LogicalResult result = forEachTimedFunction(
+      getOperation(), getAnalysisManager(), getArgument(),
+      [&](Operation *, AnalysisManager manager,
+          Remarks &remarks) -> LogicalResult {
+        const Timeline &timeline = manager.getAnalysis<Timeline>();
+        if (!timeline.isValid())
+          return failure();
+        Decider decider(policy, timeline, remarks);
+        if (failed(decider.prepare()))
+          return failure();
+        const TimedProgram &program = timeline.read();
+        const Problem &problem = program.problem();
+        for (OpId id = 0; id < problem.size(); ++id) {
+          if (problem.kind(id) != OperationKind::Idle)
+            continue;
+          Window window{program.op(id), program.site(problem.occupied(id)[0]),
+                        timeline.start(id), problem.duration(id)};
+          if (failed(decider.decide(window)))
+            return failure();
+        }
+        return success();
+      });
+  if (failed(result))
+    return signalPassFailure();
+  markAnalysesPreserved<Devices, Timeline>();
+}

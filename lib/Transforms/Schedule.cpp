@@ -1,0 +1,167 @@
+//===- Schedule.cpp - lull-schedule -----------------------------*- C++ -*-===//
+//
+// Part of the Lull project, under the Apache License v2.0 with LLVM Exceptions.
+// See LICENSE for license information.
+// SPDX-License-Identifier: Apache-2.0 WITH LLVM-exception
+//
+//===----------------------------------------------------------------------===//
+
+#include "lull/Analysis/Devices.h"
+#include "lull/Analysis/Report.h"
+#include "lull/Analysis/Timeline.h"
+#include "lull/Analysis/WindowStates.h"
+#include "lull/Timing/Schedulers.h"
+#include "lull/Transforms/Functions.h"
+#include "lull/Transforms/Passes.h"
+
+#include <fmt/format.h>
+
+namespace lull {
+#define GEN_PASS_DEF_LULLSCHEDULE
+#include "lull/Transforms/Passes.h.inc"
+} // namespace lull
+
+using namespace lull;
+using namespace mlir;
+
+namespace {
+
+struct SchedulePass : public lull::impl::LullScheduleBase<SchedulePass> {
+  using LullScheduleBase::LullScheduleBase;
+
+  void runOnOperation() override;
+
+private:
+  LogicalResult makeTight(const Timeline &timeline, Remarks &remarks);
+};
+
+/// Writes the gaps of one function as idles.
+class GapWriter {
+public:
+  GapWriter(const TimedProgram &program, const WindowStates &states,
+            Remarks &remarks)
+      : program(program), states(states), remarks(remarks),
+        builder(program.function()->getContext()),
+        protectName(builder.getStringAttr(LullDialect::protectAttrName)) {}
+
+  void write(const Gap &gap);
+
+private:
+  void writeBefore(TimedOpInterface after, const Gap &gap, WindowState state);
+  void writeAtEnd(const Gap &gap, WindowState state);
+  Value buildIdle(Location loc, Value qubit, const Gap &gap,
+                  WindowState state) {
+    return hostOf(qubit.getType())
+        ->buildIdle(builder, loc, qubit, Duration::ticks(gap.length), state);
+  }
+  void remark(Location loc, const Gap &gap, WindowState state);
+
+  const TimedProgram &program;
+  const WindowStates &states;
+  Remarks &remarks;
+  OpBuilder builder;
+  StringAttr protectName;
+};
+
+} // namespace
+
+void GapWriter::writeBefore(TimedOpInterface after, const Gap &gap,
+                            WindowState state) {
+  // Which operand the qubit is: by the operation's own order of qubits.
+  ArrayRef<ResourceId> qubits = program.problem().occupied(gap.after);
+  size_t index = llvm::find(qubits, gap.qubit) - qubits.begin();
+  SmallVector<OpOperand *, 4> operands;
+  after.collectQubits(operands);
+  builder.setInsertionPoint(after);
+  operands[index]->set(
+      buildIdle(after->getLoc(), operands[index]->get(), gap, state));
+  // The wish for the waits that end here goes along with them.
+  if (Attribute wish = after->getDiscardableAttr(protectName))
+    after->getPrevNode()->setDiscardableAttr(protectName, wish);
+}
+
+void GapWriter::writeAtEnd(const Gap &gap, WindowState state) {
+  Value qubit = program.lastValue(gap.qubit);
+  Block &block = program.function()->getRegion(0).front();
+  if (block.mightHaveTerminator())
+    builder.setInsertionPoint(block.getTerminator());
+  else
+    builder.setInsertionPointToEnd(&block);
+  Value next = buildIdle(program.op(gap.before)->getLoc(), qubit, gap, state);
+  // In value semantics, whatever returns the qubit returns the later one.
+  if (next != qubit)
+    qubit.replaceAllUsesExcept(next, next.getDefiningOp());
+}
+
+void GapWriter::remark(Location loc, const Gap &gap, WindowState state) {
+  if (!remarks.wanted())
+    return;
+  remarks.analysis(loc, "Wait",
+                   fmt::format("site {} waits {} from {} dt ({}): it {}",
+                               program.site(gap.qubit),
+                               program.device().clock().describe(gap.length),
+                               gap.start, stringifyWindowState(state).str(),
+                               describe(program, gap)),
+                   {{"Site", std::to_string(program.site(gap.qubit))},
+                    {"Start", std::to_string(gap.start)},
+                    {"Length", std::to_string(gap.length)}});
+}
+
+void GapWriter::write(const Gap &gap) {
+  WindowState state = states.before(gap.after, gap.qubit);
+  if (gap.after == NoOp) {
+    remark(program.op(gap.before)->getLoc(), gap, state);
+    return writeAtEnd(gap, state);
+  }
+  TimedOpInterface after = program.op(gap.after);
+  remark(after->getLoc(), gap, state);
+  writeBefore(after, gap, state);
+}
+
+LogicalResult SchedulePass::makeTight(const Timeline &timeline,
+                                      Remarks &remarks) {
+  const TimedProgram &program = timeline.read();
+  const Problem &problem = program.problem();
+  Schedule alap;
+  const Schedule *chosen = &timeline.schedule();
+  if (policy == SchedulePolicy::ALAP) {
+    if (std::optional<Violation> violation = scheduleAlap(problem, alap)) {
+      report(program, *violation);
+      return failure();
+    }
+    chosen = &alap;
+  }
+  if (failed(report(program, verify(problem, *chosen))))
+    return failure();
+  WindowStates states(program, spentAtEnd);
+  GapWriter writer(program, states, remarks);
+  unsigned gaps = 0;
+  forEachGap(problem, *chosen, [&](const Gap &gap) {
+    writer.write(gap);
+    ++gaps;
+  });
+  if (remarks.wanted())
+    remarks.analysis(
+        program.function()->getLoc(), "Length",
+        fmt::format("takes {}; the critical path has {} of {} operations; {} "
+                    "waits written",
+                    program.device().clock().describe(timeline.end()),
+                    criticalPath(problem, timeline.schedule()).size(),
+                    problem.size(), gaps),
+        {{"Length", std::to_string(timeline.end())},
+         {"Waits", std::to_string(gaps)}});
+  return success();
+}
+
+void SchedulePass::runOnOperation() {
+  getAnalysis<Devices>();
+  LogicalResult result = forEachTimedFunction(
+      getOperation(), getAnalysisManager(), getArgument(),
+      [&](Operation *, AnalysisManager manager, Remarks &remarks) {
+        const Timeline &timeline = manager.getAnalysis<Timeline>();
+        return timeline.isValid() ? makeTight(timeline, remarks) : failure();
+      });
+  if (failed(result))
+    return signalPassFailure();
+  markAnalysesPreserved<Devices>();
+}
