@@ -55,12 +55,11 @@ Devices::Devices(Operation *module) {
   }
 }
 
-const Device *Devices::of(Operation *function) const {
-  return byFunction.lookup(function);
-}
-
-void Devices::explain(Operation *function) const {
+const Device *Devices::require(Operation *function) const {
+  if (const Device *device = byFunction.lookup(function))
+    return device;
   if (!reported.contains(function))
     function->emitError("runs on no device: name one by the attribute "
                         "'lull.device' or with lull-use-device");
+  return nullptr;
 }

@@ -19,6 +19,17 @@ StringRef lull::nameOf(TimedOpInterface op) {
   return spell(op.getOperationKind());
 }
 
+static std::string overflowText(Ticks start, Ticks duration) {
+  return fmt::format("starts at {} dt and takes {} dt: its end does not fit in "
+                     "64 bits",
+                     start, duration);
+}
+
+void lull::emitOverflow(Operation *op, Ticks start, Ticks duration) {
+  op->emitError("'") << nameOf(cast<TimedOpInterface>(op)) << "' "
+                     << overflowText(start, duration);
+}
+
 void lull::report(const TimedProgram &program, const Violation &violation) {
   using Rule = Violation::Rule;
   const Clock &clock = program.device().clock();
@@ -63,8 +74,7 @@ void lull::report(const TimedProgram &program, const Violation &violation) {
     other("it waits for this");
     return;
   case Rule::Overflow:
-    diag << "starts at " << violation.found << " dt and takes "
-         << violation.limit << " dt: its end does not fit in 64 bits";
+    diag << overflowText(violation.found, violation.limit);
     return;
   }
 }

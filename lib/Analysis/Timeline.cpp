@@ -30,11 +30,9 @@ Timeline::Timeline(Operation *function, AnalysisManager &manager) {
     function->emitError("timed without the devices of its module");
     return;
   }
-  const Device *device = devices->of(function);
-  if (!device) {
-    devices->explain(function);
+  const Device *device = devices->require(function);
+  if (!device)
     return;
-  }
   FailureOr<TimedProgram> result = TimedProgram::read(function, *device);
   if (failed(result))
     return;

@@ -100,15 +100,15 @@ void WindowStates::forward() {
         basis[qubit] = false;
     }
   }
-  atEnd.resize(problem.numResources());
+  end.resize(problem.numResources());
   for (auto [qubit, known] : llvm::enumerate(basis))
-    atEnd[qubit].basis = known;
+    end[qubit].basis = known;
 }
 
 void WindowStates::backward(bool spentAtEnd) {
   const Problem &problem = program.problem();
   std::vector<bool> spent(problem.numResources(), spentAtEnd);
-  for (Facts &fact : atEnd)
+  for (Facts &fact : end)
     fact.spent = spentAtEnd;
   for (OpId id = problem.size(); id-- > 0;) {
     ArrayRef<ResourceId> qubits = problem.occupied(id);
@@ -154,12 +154,4 @@ WindowState WindowStates::stateOf(Facts facts) {
   if (facts.basis)
     return WindowState::Basis;
   return facts.spent ? WindowState::Spent : WindowState::Live;
-}
-
-WindowState WindowStates::before(OpId after, ResourceId qubit) const {
-  if (after == NoOp)
-    return stateOf(atEnd[qubit]);
-  ArrayRef<ResourceId> qubits = program.problem().occupied(after);
-  size_t index = llvm::find(qubits, qubit) - qubits.begin();
-  return stateOf(facts[first[after] + index]);
 }

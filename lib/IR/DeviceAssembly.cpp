@@ -1,5 +1,4 @@
-//===- DeviceAssembly.cpp - Custom directives of devices and sequences --*- C++
-//-*-===//
+//===- DeviceAssembly.cpp - Devices as text ---------------------*- C++ -*-===//
 //
 // Part of the Lull project, under the Apache License v2.0 with LLVM Exceptions.
 // See LICENSE for license information.

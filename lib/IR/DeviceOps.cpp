@@ -1,5 +1,4 @@
-//===- DeviceOps.cpp - Operations that describe devices and sequences --*- C++
-//-*-===//
+//===- DeviceOps.cpp - Devices and sequences --------------------*- C++ -*-===//
 //
 // Part of the Lull project, under the Apache License v2.0 with LLVM Exceptions.
 // See LICENSE for license information.

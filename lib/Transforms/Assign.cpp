@@ -271,5 +271,7 @@ void AssignPass::runOnOperation() {
       });
   if (failed(result))
     return signalPassFailure();
-  markAnalysesPreserved<Devices, Timeline>();
+  // Nobody needs the timeline again before operations change, and in large
+  // programs it is large.
+  markAnalysesPreserved<Devices>();
 }

@@ -7,10 +7,11 @@
 //===----------------------------------------------------------------------===//
 
 #include "lull/Analysis/Devices.h"
-#include "lull/Analysis/Timeline.h"
+#include "lull/Analysis/ProgramReader.h"
 #include "lull/Transforms/Functions.h"
 #include "lull/Transforms/Passes.h"
 #include "lull/Transforms/Plans.h"
+#include "lull/Transforms/PulseWriter.h"
 
 #include <fmt/format.h>
 
@@ -33,36 +34,39 @@ struct EmitPass : public lull::impl::LullEmitBase<EmitPass> {
 /// Emits the planned windows of one function.
 class Emitter {
 public:
-  Emitter(const Timeline &timeline, Remarks &remarks)
-      : program(timeline.read()), timeline(timeline), remarks(remarks),
-        plans(program.device(), program.function()),
-        builder(program.function()->getContext()) {}
+  Emitter(Operation *function, const Device &device, bool native,
+          Remarks &remarks)
+      : device(device), native(native), remarks(remarks),
+        reader(function, device), plans(device, function),
+        builder(function->getContext()), writer(builder, device) {}
 
-  LogicalResult emit(OpId id);
+  LogicalResult run();
 
 private:
-  /// Replaces the idle; `placement` holds the starts.
-  void rewrite(TimedOpInterface idle, const Player &player,
-               const Placement &placement, Ticks length);
-  void remark(OpId id, PlanAttr plan, const Player &player,
-              const Placement &placement);
+  LogicalResult emit(PlanAttr plan);
+  /// Replaces the idle that was read last.
+  void rewrite(const Player &player, const Placement &placement);
+  void remark(PlanAttr plan, const Player &player, const Placement &placement);
 
-  const TimedProgram &program;
-  const Timeline &timeline;
+  const Device &device;
+  bool native;
   Remarks &remarks;
+  ProgramReader reader;
   Plans plans;
   OpBuilder builder;
+  PulseWriter writer;
+  /// The pulses of the window at hand, if they are to be native.
+  SmallVector<const NativePulse *> natives;
 };
 
 } // namespace
 
-void Emitter::rewrite(TimedOpInterface idle, const Player &player,
-                      const Placement &placement, Ticks length) {
-  SmallVector<OpOperand *, 1> operands;
-  idle.collectQubits(operands);
-  Value qubit = operands.front()->get();
+void Emitter::rewrite(const Player &player, const Placement &placement) {
+  TimedOpInterface idle = reader.step().op;
+  Value qubit = reader.step().operands.front()->get();
   const HostInterface *host = hostOf(qubit.getType());
   bool carry = host->hasValueSemantics();
+  SiteId site = reader.site(reader.step().qubits.front());
   Location loc = idle->getLoc();
   builder.setInsertionPoint(idle);
   const Sequence &sequence = player.sequence();
@@ -76,79 +80,98 @@ void Emitter::rewrite(TimedOpInterface idle, const Player &player,
   };
   for (size_t i = 0; i < sequence.size(); ++i) {
     wait(placement.starts[i]);
-    auto pulse = PulseOp::create(builder, loc, qubit, sequence.phases[i],
-                                 Duration::ticks(widths[i]),
-                                 i + 1 == sequence.size(), carry);
-    if (carry)
-      qubit = pulse.getCarried();
+    bool last = i + 1 == sequence.size();
+    if (natives.empty()) {
+      auto pulse = PulseOp::create(builder, loc, qubit, sequence.phases[i],
+                                   Duration::ticks(widths[i]), last, carry);
+      qubit = carry ? pulse.getCarried() : qubit;
+    } else {
+      qubit = writer.play(loc, qubit, site, *natives[i], last);
+    }
     now += widths[i];
   }
-  wait(length);
-  if (Value carrier = idle.getCarrier(0))
+  wait(reader.step().duration);
+  if (Value carrier = idle.getCarrier(0)) {
     carrier.replaceAllUsesWith(qubit);
+    reader.carryOn(reader.step().qubits.front(), qubit);
+  }
   idle->erase();
 }
 
-void Emitter::remark(OpId id, PlanAttr plan, const Player &player,
+void Emitter::remark(PlanAttr plan, const Player &player,
                      const Placement &placement) {
-  const Clock &clock = program.device().clock();
-  SiteId site = program.site(program.problem().occupied(id)[0]);
-  Ticks length = program.problem().duration(id);
+  const ProgramReader::Step &step = reader.step();
+  SiteId site = reader.site(step.qubits.front());
+  size_t pulses = player.sequence().size();
   remarks.passed(
-      program.op(id)->getLoc(), "Protected",
+      TimedOpInterface(step.op)->getLoc(), "Protected",
       fmt::format("window of {} on site {} protected by {}: {} pulses, "
                   "residual {} dt",
-                  clock.describe(length), site, player.sequence().name,
-                  player.sequence().size(), placement.residual),
+                  device.clock().describe(step.duration), site,
+                  player.sequence().name, pulses, placement.residual),
       {{"Site", std::to_string(site)},
-       {"Start", std::to_string(timeline.start(id))},
-       {"Length", std::to_string(length)},
+       {"Start", std::to_string(step.start)},
+       {"Length", std::to_string(step.duration)},
        {"Repeats", std::to_string(plan.getRepeats())},
-       {"Pulses", std::to_string(player.sequence().size())},
+       {"Pulses", std::to_string(pulses)},
        {"Residual", std::to_string(placement.residual)}});
 }
 
-LogicalResult Emitter::emit(OpId id) {
-  TimedOpInterface idle = program.op(id);
-  PlanAttr plan = idle.getWindowPlan();
-  if (!plan)
-    return success();
-  const Problem &problem = program.problem();
-  SiteId site = program.site(problem.occupied(id)[0]);
+LogicalResult Emitter::emit(PlanAttr plan) {
+  const ProgramReader::Step &step = reader.step();
+  TimedOpInterface idle = step.op;
+  SiteId site = reader.site(step.qubits.front());
   llvm::Expected<Player *> player = plans.player(plan, site);
   if (!player)
     return idle->emitError(llvm::toString(player.takeError()));
-  Ticks length = problem.duration(id);
   llvm::Expected<const Placement *> placement =
-      (*player)->place(plans.window(timeline.start(id), length));
+      (*player)->place(plans.window(step.start, step.duration));
   if (!placement)
     return idle->emitError("the plan '")
            << (*player)->sequence().name << "' on site " << site
            << " does not fit: " << llvm::toString(placement.takeError());
+  natives.clear();
+  if (native)
+    for (Fraction phase : (*player)->sequence().phases) {
+      llvm::Expected<const NativePulse *> pulse = writer.resolve(site, phase);
+      if (!pulse)
+        return idle->emitError(llvm::toString(pulse.takeError()));
+      natives.push_back(*pulse);
+    }
   if (remarks.wanted())
-    remark(id, plan, **player, **placement);
-  rewrite(idle, **player, **placement, length);
+    remark(plan, **player, **placement);
+  rewrite(**player, **placement);
+  return success();
+}
+
+LogicalResult Emitter::run() {
+  FailureOr<Block *> body = reader.body();
+  if (failed(body))
+    return failure();
+  for (Operation &op : llvm::make_early_inc_range(**body)) {
+    FailureOr<bool> timed = reader.read(&op);
+    if (failed(timed))
+      return failure();
+    if (!*timed || reader.step().kind != OperationKind::Idle)
+      continue;
+    if (PlanAttr plan = TimedOpInterface(reader.step().op).getWindowPlan())
+      if (failed(emit(plan)))
+        return failure();
+  }
   return success();
 }
 
 void EmitPass::runOnOperation() {
-  getAnalysis<Devices>();
-  LogicalResult result =
-      forEachTimedFunction(getOperation(), getAnalysisManager(), getArgument(),
-                           [&](Operation *, AnalysisManager manager,
-                               Remarks &remarks) -> LogicalResult {
-                             const Timeline &timeline =
-                                 manager.getAnalysis<Timeline>();
-                             if (!timeline.isValid())
-                               return failure();
-                             const Problem &problem = timeline.read().problem();
-                             Emitter emitter(timeline, remarks);
-                             for (OpId id = 0; id < problem.size(); ++id)
-                               if (problem.kind(id) == OperationKind::Idle &&
-                                   failed(emitter.emit(id)))
-                                 return failure();
-                             return success();
-                           });
+  const Devices &devices = getAnalysis<Devices>();
+  LogicalResult result = forEachTimedFunction(
+      getOperation(), getAnalysisManager(), getArgument(),
+      [&](Operation *function, AnalysisManager,
+          Remarks &remarks) -> LogicalResult {
+        const Device *device = devices.require(function);
+        return failure(
+            !device ||
+            failed(Emitter(function, *device, native, remarks).run()));
+      });
   if (failed(result))
     return signalPassFailure();
   markAnalysesPreserved<Devices>();

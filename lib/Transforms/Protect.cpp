@@ -42,7 +42,11 @@ void lull::buildProtectPipeline(OpPassManager &manager,
   assign.alsoSpent = options.alsoSpent;
   manager.addPass(createLullAssign(assign));
 
-  manager.addPass(createLullEmit());
+  // The same as emitting and lull-native, without writing every pulse twice;
+  // lull-native remains for pulses that the program had already.
+  LullEmitOptions emit;
+  emit.native = options.native;
+  manager.addPass(createLullEmit(emit));
   if (options.native)
     manager.addPass(createLullNative());
 }

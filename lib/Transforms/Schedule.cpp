@@ -47,8 +47,8 @@ public:
   void write(const Gap &gap);
 
 private:
-  void writeBefore(TimedOpInterface after, const Gap &gap, WindowState state);
-  void writeAtEnd(const Gap &gap, WindowState state);
+  void writeBefore(TimedOpInterface after, const Gap &gap);
+  void writeAtEnd(const Gap &gap);
   Value buildIdle(Location loc, Value qubit, const Gap &gap,
                   WindowState state) {
     return hostOf(qubit.getType())
@@ -61,17 +61,28 @@ private:
   Remarks &remarks;
   OpBuilder builder;
   StringAttr protectName;
+  /// The operation that gaps end at, its qubit operands, and the one reached:
+  /// the gaps before one operation come in the order of its qubits, and a
+  /// barrier may have thousands.
+  OpId current = NoOp;
+  SmallVector<OpOperand *, 4> operands;
+  size_t index = 0;
 };
 
 } // namespace
 
-void GapWriter::writeBefore(TimedOpInterface after, const Gap &gap,
-                            WindowState state) {
-  // Which operand the qubit is: by the operation's own order of qubits.
+void GapWriter::writeBefore(TimedOpInterface after, const Gap &gap) {
+  if (current != gap.after) {
+    current = gap.after;
+    operands.clear();
+    after.collectQubits(operands);
+    index = 0;
+  }
   ArrayRef<ResourceId> qubits = program.problem().occupied(gap.after);
-  size_t index = llvm::find(qubits, gap.qubit) - qubits.begin();
-  SmallVector<OpOperand *, 4> operands;
-  after.collectQubits(operands);
+  while (qubits[index] != gap.qubit)
+    ++index;
+  WindowState state = states.before(gap.after, index);
+  remark(after->getLoc(), gap, state);
   builder.setInsertionPoint(after);
   operands[index]->set(
       buildIdle(after->getLoc(), operands[index]->get(), gap, state));
@@ -80,14 +91,17 @@ void GapWriter::writeBefore(TimedOpInterface after, const Gap &gap,
     after->getPrevNode()->setDiscardableAttr(protectName, wish);
 }
 
-void GapWriter::writeAtEnd(const Gap &gap, WindowState state) {
+void GapWriter::writeAtEnd(const Gap &gap) {
+  WindowState state = states.atEnd(gap.qubit);
+  Location loc = TimedOpInterface(program.op(gap.before))->getLoc();
+  remark(loc, gap, state);
   Value qubit = program.lastValue(gap.qubit);
   Block &block = program.function()->getRegion(0).front();
   if (block.mightHaveTerminator())
     builder.setInsertionPoint(block.getTerminator());
   else
     builder.setInsertionPointToEnd(&block);
-  Value next = buildIdle(program.op(gap.before)->getLoc(), qubit, gap, state);
+  Value next = buildIdle(loc, qubit, gap, state);
   // In value semantics, whatever returns the qubit returns the later one.
   if (next != qubit)
     qubit.replaceAllUsesExcept(next, next.getDefiningOp());
@@ -108,14 +122,10 @@ void GapWriter::remark(Location loc, const Gap &gap, WindowState state) {
 }
 
 void GapWriter::write(const Gap &gap) {
-  WindowState state = states.before(gap.after, gap.qubit);
-  if (gap.after == NoOp) {
-    remark(program.op(gap.before)->getLoc(), gap, state);
-    return writeAtEnd(gap, state);
-  }
-  TimedOpInterface after = program.op(gap.after);
-  remark(after->getLoc(), gap, state);
-  writeBefore(after, gap, state);
+  if (gap.after == NoOp)
+    writeAtEnd(gap);
+  else
+    writeBefore(program.op(gap.after), gap);
 }
 
 LogicalResult SchedulePass::makeTight(const Timeline &timeline,

@@ -75,12 +75,8 @@ void SetDurationsPass::runOnOperation() {
   LogicalResult result = forEachTimedFunction(
       getOperation(), getAnalysisManager(), getArgument(),
       [&](Operation *function, AnalysisManager, Remarks &) -> LogicalResult {
-        const Device *device = devices.of(function);
-        if (!device) {
-          devices.explain(function);
-          return failure();
-        }
-        return setAll(function, *device);
+        const Device *device = devices.require(function);
+        return failure(!device || failed(setAll(function, *device)));
       });
   if (failed(result))
     return signalPassFailure();

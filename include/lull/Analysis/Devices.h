@@ -23,11 +23,9 @@ public:
   /// Converts the devices in use. What is wrong with them is emitted.
   explicit Devices(mlir::Operation *module);
 
-  /// The device that `function` runs on, or null: then `explain` says why.
-  const Device *of(mlir::Operation *function) const;
-  /// Emits the reason why a function has no usable device, unless that device
-  /// has had its errors already.
-  void explain(mlir::Operation *function) const;
+  /// The device that `function` runs on. If it has none that is usable, emits
+  /// why (unless that device has had its errors already) and returns null.
+  const Device *require(mlir::Operation *function) const;
 
 private:
   llvm::DenseMap<mlir::Operation *, const Device *> byFunction;

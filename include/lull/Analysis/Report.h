@@ -18,6 +18,9 @@ namespace lull {
 /// one. The only place that words violations.
 void report(const TimedProgram &program, const Violation &violation);
 
+/// Emits that the end of an operation is beyond 64 bits.
+void emitOverflow(mlir::Operation *op, Ticks start, Ticks duration);
+
 /// Emits all of them; fails if there are any.
 llvm::LogicalResult report(const TimedProgram &program,
                            llvm::ArrayRef<Violation> violations);

@@ -40,8 +40,6 @@ public:
   mlir::Value lastValue(ResourceId qubit) const { return last[qubit]; }
 
 private:
-  friend class ProgramReader;
-
   mlir::Operation *root = nullptr;
   const Device *target = nullptr;
   Problem input;

@@ -39,9 +39,13 @@ class WindowStates {
 public:
   WindowStates(const TimedProgram &program, bool spentAtEnd);
 
-  /// What the qubit holds while it waits for operation `after`, one of whose
-  /// qubits it is; at the end of the function for NoOp.
-  WindowState before(OpId after, ResourceId qubit) const;
+  /// What the `index`-th qubit of operation `after` holds while it waits for
+  /// that operation.
+  WindowState before(OpId after, size_t index) const {
+    return stateOf(facts[first[after] + index]);
+  }
+  /// What the qubit holds at the end of the function.
+  WindowState atEnd(ResourceId qubit) const { return stateOf(end[qubit]); }
 
 private:
   struct Facts {
@@ -57,7 +61,7 @@ private:
   std::vector<Facts> facts;
   std::vector<std::uint32_t> first;
   /// By qubit.
-  std::vector<Facts> atEnd;
+  std::vector<Facts> end;
   std::vector<BasisAction> actions;
 };
 

@@ -1,5 +1,4 @@
-//===- DeviceBuilder.h - From the device op to the plain device --*- C++
-//-*-===//
+//===- DeviceBuilder.h - From device op to device ---------------*- C++ -*-===//
 //
 // Part of the Lull project, under the Apache License v2.0 with LLVM Exceptions.
 // See LICENSE for license information.

@@ -1,4 +1,4 @@
-//===- LullDeviceOps.td - Operations that describe devices and sequences --*- tablegen -*-===//
+//===- LullDeviceOps.td - Devices and sequences ------------*- tablegen -*-===//
 //
 // Part of the Lull project, under the Apache License v2.0 with LLVM Exceptions.
 // See LICENSE for license information.

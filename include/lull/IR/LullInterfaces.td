@@ -1,4 +1,4 @@
-//===- LullInterfaces.td - What the passes are written against --*- tablegen -*-===//
+//===- LullInterfaces.td - What passes see -----------------*- tablegen -*-===//
 //
 // Part of the Lull project, under the Apache License v2.0 with LLVM Exceptions.
 // See LICENSE for license information.

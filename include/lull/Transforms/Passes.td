@@ -113,7 +113,14 @@ def LullEmit : Lull_Pass<"lull-emit"> {
     the placements on the grid it takes the one of least residual, then of least
     displacement (docs/Spec.md). A plan that does not fit its window is an
     error. A remark per window gives the sequence, pulses and residual.
+
+    With `native` the pulses are written in the device's operations at once, as
+    `lull-native` would: the same result without the step between.
   }];
+  let options = [
+    Option<"native", "native", "bool", "false",
+           "Write the pulses in the operations of the device">,
+  ];
 }
 
 def LullNative : Lull_Pass<"lull-native"> {
@@ -123,6 +130,17 @@ def LullNative : Lull_Pass<"lull-native"> {
     itself where there is one, else another pulse between frame changes, else
     two half turns. Frame changes within a window are merged and sum to zero. A
     pulse that the device cannot play is an error that says what is missing.
+  }];
+}
+
+def LullPrintTimeline : Lull_Pass<"lull-print-timeline"> {
+  let summary = "Print when operations start and how far they can float";
+  let description = [{
+    For each function a table of its timed operations: start, end and total
+    slack in dt (how much later it can start without moving the end of the
+    program; `critical` for those on the critical path), what it is and the
+    sites it acts on; then the length in dt and seconds. The module does not
+    change.
   }];
 }
 
