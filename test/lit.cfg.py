@@ -13,6 +13,8 @@ config.test_source_root = os.path.dirname(__file__)
 config.excludes = ["Unit", "Inputs", "Bench", "CMakeLists.txt"]
 
 llvm_config.use_default_substitutions()
+# `not` and `count` are looked up there, not substituted.
+llvm_config.with_environment("PATH", config.llvm_tools_dir, append_path=True)
 llvm_config.with_system_environment(
     ["HOME", "TMP", "TEMP", "LLVM_PROFILE_FILE", "ASAN_OPTIONS", "UBSAN_OPTIONS"]
 )
@@ -28,6 +30,7 @@ tool_dirs = [config.lull_tools_dir, config.llvm_tools_dir]
 llvm_config.add_tool_substitutions(
     [
         ToolSubst("lull-opt", extra_args=opt_args),
+        ToolSubst("lull-host-opt", extra_args=opt_args),
         "lull-show",
         "lull-lsp-server",
         "mlir-opt",
@@ -39,6 +42,7 @@ config.substitutions += [
     ("%python", config.python_executable),
     ("%lull_src", config.lull_source_dir),
     ("%lull_build", config.lull_build_dir),
+    ("%lull_tools", config.lull_tools_dir),
     (
         "%plugin_flags",
         "--load-dialect-plugin=%s/LullPlugin.so --load-pass-plugin=%s/LullPlugin.so"

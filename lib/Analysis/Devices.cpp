@@ -31,14 +31,11 @@ SmallVector<Operation *> lull::timedFunctions(Operation *root) {
 Devices::Devices(Operation *module) {
   SymbolTableCollection symbols;
   for (Operation *function : timedFunctions(module)) {
-    Operation *at = function;
     FlatSymbolRefAttr symbol;
-    for (; at && !symbol; at = at->getParentOp())
-      symbol =
-          at->getAttrOfType<FlatSymbolRefAttr>(LullDialect::deviceAttrName);
-    if (!symbol)
+    Operation *holder = deviceHolder(function, symbol);
+    if (!holder)
       continue;
-    auto op = symbols.lookupNearestSymbolFrom<DeviceOp>(function, symbol);
+    auto op = symbols.lookupNearestSymbolFrom<DeviceOp>(holder, symbol);
     if (!op) {
       function->emitError("unknown device ") << symbol;
       reported.insert(function);
@@ -58,6 +55,7 @@ Devices::Devices(Operation *module) {
 const Device *Devices::require(Operation *function) const {
   if (const Device *device = byFunction.lookup(function))
     return device;
+  // W1: a device.
   if (!reported.contains(function))
     function->emitError("runs on no device: name one by the attribute "
                         "'lull.device' or with lull-use-device");

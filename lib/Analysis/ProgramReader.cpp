@@ -10,18 +10,25 @@
 
 #include "lull/Analysis/Report.h"
 #include "lull/IR/QubitSites.h"
+#include "lull/Timing/Fault.h"
 
 using namespace lull;
 using namespace mlir;
+
+static LogicalResult emitStale(Operation *user) {
+  return user->emitError("takes a qubit value that an earlier operation has "
+                         "carried on");
+}
 
 FailureOr<ResourceId> ProgramReader::qubitOf(Value value, Operation *user) {
   if (auto known = byValue.find(value); known != byValue.end()) {
     if (known->second != NoResource)
       return known->second;
-    return user->emitError("takes a qubit value that an earlier operation has "
-                           "carried on");
+    // S3: not used up.
+    return emitStale(user);
   }
   std::optional<SiteId> site = originOf(value, function);
+  // Q7, Q3: a known site of the device.
   if (!site)
     return emitUnknownSite(user, value);
   if (!target->hasSite(*site))
@@ -41,23 +48,27 @@ FailureOr<Ticks> ProgramReader::durationOf(TimedOpInterface op) {
   Duration duration = op.getDuration();
   if (duration.unit() == TimeUnit::dt && !duration.isNegative())
     return duration.amount();
+  // W5: a duration.
   if (!duration.isSet())
     return op->emitError("'")
            << nameOf(op)
-           << "' has no duration: write one with 'for', or run "
-              "lull-set-durations first";
+           << (op.getListedName()
+                   ? "' has no duration: state one, or run lull-set-durations "
+                     "first"
+                   : "' has no duration");
+  // T1, T3, T8: on the clock.
   llvm::Expected<Ticks> ticks = target->clock().toTicks(duration);
   if (!ticks)
     return op->emitError(llvm::toString(ticks.takeError()));
   return *ticks;
 }
 
-void ProgramReader::carryOn(ResourceId qubit, Value value) {
-  if (value == values[qubit])
+void ProgramReader::carryOn(ResourceId qubit, Value from, Value to) {
+  if (from == to)
     return;
-  byValue[values[qubit]] = NoResource;
-  byValue[value] = qubit;
-  values[qubit] = value;
+  byValue[from] = NoResource;
+  byValue[to] = qubit;
+  values[qubit] = to;
 }
 
 LogicalResult ProgramReader::readTimed(TimedOpInterface op) {
@@ -74,11 +85,15 @@ LogicalResult ProgramReader::readTimed(TimedOpInterface op) {
     last.qubits.push_back(*qubit);
     last.start = std::max(last.start, clocks[*qubit]);
   }
+  if (failed(requireOneQubit(op, last.qubits.size())) ||
+      failed(followOutcomes(op)))
+    return failure();
   FailureOr<Ticks> duration = durationOf(op);
   if (failed(duration))
     return failure();
   last.duration = *duration;
   Ticks end = 0;
+  // T9: an end in 64 bits.
   if (__builtin_add_overflow(last.start, last.duration, &end)) {
     emitOverflow(op, last.start, last.duration);
     return failure();
@@ -87,32 +102,81 @@ LogicalResult ProgramReader::readTimed(TimedOpInterface op) {
   for (auto [index, qubit] : llvm::enumerate(last.qubits)) {
     clocks[qubit] = end;
     if (Value carrier = carries ? op.getCarrier(index) : Value())
-      carryOn(qubit, carrier);
+      carryOn(qubit, last.operands[index]->get(), carrier);
   }
   return success();
 }
 
-LogicalResult ProgramReader::readOther(Operation *op) {
-  if (op->getNumRegions()) {
-    Operation *inner = nullptr;
-    op->walk([&](TimedOpInterface timed) {
-      inner = timed;
-      return WalkResult::interrupt();
-    });
-    if (inner) {
-      InFlightDiagnostic diag =
-          op->emitError("timed operations in a region cannot be scheduled yet");
-      diag.attachNote(inner->getLoc()) << "a timed operation is here";
-      return diag;
-    }
-  }
-  if (op->hasTrait<OpTrait::IsTerminator>())
+LogicalResult ProgramReader::requireOneQubit(TimedOpInterface op,
+                                             size_t count) {
+  OperationKind kind = op.getOperationKind();
+  // Q8: a window is one qubit's, and so is a pulse.
+  if (count == 1 ||
+      (kind != OperationKind::Idle && kind != OperationKind::Pulse))
     return success();
+  return op->emitError("'")
+         << nameOf(op) << "' acts on " << counted(count, "qubit")
+         << " when it should act on 1";
+}
+
+LogicalResult ProgramReader::followOutcomes(Operation *op) {
+  bool timed = isa<TimedOpInterface>(op);
+  // Most operations take qubits only and give nothing.
+  bool depends =
+      !outcomes.empty() && llvm::any_of(op->getOperands(), [&](Value operand) {
+        return outcomes.contains(operand);
+      });
+  // W28: an outcome is there when its operation ends, which the timing rule
+  // does not know.
+  if (timed && depends)
+    return op->emitError("depends on the outcome of an operation: it cannot be "
+                         "scheduled yet");
+  if (op->getNumResults() == 0)
+    return success();
+  for (OpResult result : op->getResults()) {
+    if (result.getType() != lastType) {
+      lastType = result.getType();
+      lastIsQubit = hostOf(lastType);
+    }
+    if ((timed || depends) && !lastIsQubit)
+      outcomes.insert(result);
+  }
+  return success();
+}
+
+LogicalResult ProgramReader::requireUntimed(Operation *op) {
+  if (op->getNumRegions() == 0)
+    return success();
+  Operation *inner = nullptr;
+  op->walk([&](TimedOpInterface timed) {
+    inner = timed;
+    return WalkResult::interrupt();
+  });
+  // W3: no time in regions.
+  if (!inner)
+    return success();
+  InFlightDiagnostic diag =
+      op->emitError("timed operations in a region cannot be scheduled yet");
+  diag.attachNote(inner->getLoc()) << "a timed operation is here";
+  return diag;
+}
+
+LogicalResult ProgramReader::readOther(Operation *op) {
+  if (failed(requireUntimed(op)) || failed(followOutcomes(op)))
+    return failure();
+  // What a terminator hands on is not acted on, but must be there to hand on.
+  if (op->hasTrait<OpTrait::IsTerminator>())
+    return success(llvm::none_of(op->getOperands(), [&](Value operand) {
+      auto known = byValue.find(operand);
+      return known != byValue.end() && known->second == NoResource &&
+             failed(emitStale(op));
+    }));
   for (Value operand : op->getOperands()) {
     if (operand.getType() != lastType) {
       lastType = operand.getType();
       lastIsQubit = hostOf(lastType);
     }
+    // W4: nothing unknown happens to a qubit.
     if (lastIsQubit)
       return op->emitError("acts on a qubit but is no timed operation: what it "
                            "does and how long it takes is unknown");
@@ -129,6 +193,7 @@ FailureOr<bool> ProgramReader::read(Operation *op) {
 
 FailureOr<Block *> ProgramReader::body() {
   Region &region = function->getRegion(0);
+  // W2: one block.
   if (region.hasOneBlock())
     return &region.front();
   return function->emitError("has ")

@@ -23,10 +23,8 @@ FailureOr<TimedProgram> TimedProgram::read(Operation *function,
   TimedProgram program;
   program.root = function;
   program.target = &device;
-  // Counting first costs a walk and saves the copies that growth makes.
-  size_t count = (*body)->getOperations().size();
-  program.input.reserve(count, count + count / 2);
-  program.ops.reserve(count);
+  // No reserve: to count the operations is to walk the list, which costs more
+  // than the copies of growth.
   for (Operation &op : **body) {
     FailureOr<bool> timed = reader.read(&op);
     if (failed(timed))

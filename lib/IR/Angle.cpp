@@ -10,6 +10,8 @@
 
 #include <fmt/format.h>
 
+#include <cmath>
+
 using namespace lull;
 
 double Angle::value() const {
@@ -28,6 +30,8 @@ std::string Angle::str() const {
 
 std::string lull::spellReal(double value) {
   std::string text = fmt::format("{}", value);
+  if (!std::isfinite(value))
+    return text;
   size_t exponent = text.find('e');
   if (text.find('.') == std::string::npos)
     text.insert(exponent == std::string::npos ? text.size() : exponent, ".0");

@@ -16,172 +16,6 @@
 using namespace lull;
 using namespace mlir;
 
-//===----------------------------------------------------------------------===//
-// Shared by attributes and operations
-//===----------------------------------------------------------------------===//
-
-/// Reads a decimal number as text. MLIR's parser offers floats as doubles only,
-/// so the digits of one are taken from the source between two locations.
-static ParseResult parseDecimal(AsmParser &parser, std::string &text) {
-  // Asking for an integer first would eat the minus of `-0.5` for good.
-  bool negative = succeeded(parser.parseOptionalMinus());
-  SMLoc start = parser.getCurrentLocation();
-  APInt whole;
-  OptionalParseResult integer = parser.parseOptionalInteger(whole);
-  if (integer.has_value()) {
-    if (failed(*integer))
-      return failure();
-    llvm::SmallString<24> digits;
-    whole.toString(digits, 10, /*Signed=*/true);
-    text = (negative ? "-" : "") + digits.str().str();
-    return success();
-  }
-  double rounded = 0;
-  if (parser.parseFloat(rounded))
-    return failure();
-  const char *begin = start.getPointer();
-  StringRef spelled(begin, parser.getCurrentLocation().getPointer() - begin);
-  spelled = spelled.take_until([](char c) { return llvm::isSpace(c); });
-  text = (negative ? "-" : "") + spelled.str();
-  return success();
-}
-
-/// Turns an error of a plain room into one at `loc`.
-static ParseResult emitFault(AsmParser &parser, SMLoc loc, llvm::Error error) {
-  return parser.emitError(loc) << llvm::toString(std::move(error));
-}
-
-/// Exact arithmetic on multiples of pi needs room below 64 bits.
-static ParseResult checkMultiple(AsmParser &parser, SMLoc loc,
-                                 Fraction multiple) {
-  if (Angle::isSound(multiple))
-    return success();
-  return parser.emitError(loc) << "multiple " << multiple.str()
-                               << " of pi goes beyond " << Angle::mostTerm;
-}
-
-ParseResult lull::parseDuration(AsmParser &parser, Duration &value) {
-  SMLoc loc = parser.getCurrentLocation();
-  std::string number;
-  StringRef unitText;
-  if (parseDecimal(parser, number))
-    return failure();
-  SMLoc unitLoc = parser.getCurrentLocation();
-  if (parser.parseOptionalKeyword(&unitText))
-    return parser.emitError(unitLoc)
-           << "expected a unit after " << number << ": dt, ns, us, ms or s";
-  std::optional<TimeUnit> unit = parseTimeUnit(unitText);
-  if (!unit)
-    return parser.emitError(unitLoc)
-           << "unknown unit '" << unitText << "': expected dt, ns, us, ms or s";
-  llvm::Expected<Duration> parsed = Duration::parse(number, *unit);
-  if (!parsed)
-    return emitFault(parser, loc, parsed.takeError());
-  value = *parsed;
-  return success();
-}
-
-ParseResult lull::parseFraction(AsmParser &parser, Fraction &value) {
-  SMLoc loc = parser.getCurrentLocation();
-  bool negative = succeeded(parser.parseOptionalMinus());
-  int64_t numerator = 0, denominator = 1;
-  if (parser.parseInteger(numerator))
-    return failure();
-  if (succeeded(parser.parseOptionalSlash()) &&
-      parser.parseInteger(denominator))
-    return failure();
-  llvm::Expected<Fraction> made =
-      Fraction::make(negative ? -numerator : numerator, denominator);
-  if (!made)
-    return emitFault(parser, loc, made.takeError());
-  value = *made;
-  return success();
-}
-
-ParseResult lull::parsePhase(AsmParser &parser, Fraction &value) {
-  SMLoc loc = parser.getCurrentLocation();
-  if (succeeded(parser.parseOptionalKeyword("pi"))) {
-    value = 1;
-    return success();
-  }
-  if (parseFraction(parser, value) || parser.parseKeyword("pi"))
-    return failure();
-  return checkMultiple(parser, loc, value);
-}
-
-ParseResult lull::parseAngle(AsmParser &parser, Angle &value) {
-  SMLoc loc = parser.getCurrentLocation();
-  bool negative = succeeded(parser.parseOptionalMinus());
-  if (succeeded(parser.parseOptionalKeyword("pi"))) {
-    value = Angle::ofPi(negative ? -1 : 1);
-    return success();
-  }
-  int64_t numerator = 0, denominator = 1;
-  OptionalParseResult integer = parser.parseOptionalInteger(numerator);
-  if (!integer.has_value()) {
-    double real = 0;
-    if (parser.parseFloat(real))
-      return failure();
-    if (succeeded(parser.parseOptionalKeyword("pi")))
-      return parser.emitError(loc)
-             << "a multiple of pi is written as a fraction, such as 1/2 pi";
-    value = Angle::radians(negative ? -real : real);
-    return success();
-  }
-  if (failed(*integer))
-    return failure();
-  bool fraction = succeeded(parser.parseOptionalSlash());
-  if (fraction && parser.parseInteger(denominator))
-    return failure();
-  if (failed(parser.parseOptionalKeyword("pi"))) {
-    if (fraction)
-      return parser.emitError(loc) << "expected 'pi' after the fraction";
-    value = Angle::radians(negative ? -double(numerator) : double(numerator));
-    return success();
-  }
-  llvm::Expected<Fraction> multiple =
-      Fraction::make(negative ? -numerator : numerator, denominator);
-  if (!multiple)
-    return emitFault(parser, loc, multiple.takeError());
-  value = Angle::ofPi(*multiple);
-  return checkMultiple(parser, loc, *multiple);
-}
-
-ParseResult lull::parsePlanBody(AsmParser &parser, PlanAttr &plan) {
-  SMLoc loc = parser.getCurrentLocation();
-  std::string name;
-  StringAttr symbol;
-  Attribute sequence;
-  if (succeeded(parser.parseOptionalString(&name)))
-    sequence = parser.getBuilder().getStringAttr(name);
-  else if (succeeded(parser.parseOptionalSymbolName(symbol)))
-    sequence = FlatSymbolRefAttr::get(symbol);
-  else
-    return parser.emitError(loc)
-           << "expected a sequence: a name such as \"xy8\" or a symbol";
-  unsigned repeats = 1;
-  if (succeeded(parser.parseOptionalKeyword("repeats")) &&
-      parser.parseInteger(repeats))
-    return failure();
-  bool alternating = succeeded(parser.parseOptionalKeyword("alternating"));
-  plan =
-      PlanAttr::getChecked([&] { return parser.emitError(loc); },
-                           parser.getContext(), sequence, repeats, alternating);
-  return success(plan != nullptr);
-}
-
-void lull::printPlanBody(AsmPrinter &printer, PlanAttr plan) {
-  printer << plan.getSequence();
-  if (plan.getRepeats() != 1)
-    printer << " repeats " << plan.getRepeats();
-  if (plan.getAlternating())
-    printer << " alternating";
-}
-
-//===----------------------------------------------------------------------===//
-// Programs
-//===----------------------------------------------------------------------===//
-
 ParseResult lull::parseFor(OpAsmParser &parser, Duration &value) {
   if (succeeded(parser.parseOptionalKeyword("for")))
     return parseDuration(parser, value);
@@ -199,8 +33,7 @@ void lull::printFor(OpAsmPrinter &printer, Operation *, const Duration &value) {
     printer << value.str();
 }
 
-/// Whether MLIR's lexer reads `text` as one bare identifier.
-static bool isBareWord(StringRef text) {
+bool lull::isBareWord(StringRef text) {
   return !text.empty() && (llvm::isAlpha(text[0]) || text[0] == '_') &&
          llvm::all_of(text, [](char c) {
            return llvm::isAlnum(c) || c == '_' || c == '$' || c == '.';
@@ -259,6 +92,7 @@ ParseResult lull::parseState(OpAsmParser &parser, WindowStateAttr &state) {
   if (parser.parseOptionalKeyword(&word))
     return parser.emitError(loc)
            << "expected what the qubit holds: basis, live or spent";
+  // P9: a state that there is.
   std::optional<WindowState> value = symbolizeWindowState(word);
   if (!value)
     return parser.emitError(loc)

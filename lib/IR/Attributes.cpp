@@ -37,11 +37,14 @@ void LullDialect::registerAttributes() {
 
 LogicalResult PlanAttr::verify(EmitError emitError, Attribute sequence,
                                unsigned repeats, bool alternating) {
+  // P10: a name or a symbol.
   if (!isa_and_nonnull<StringAttr, FlatSymbolRefAttr>(sequence))
     return emitError() << "the sequence of a plan is a name or a symbol, not "
                        << sequence;
-  if (repeats == 0)
-    return emitError() << "a plan repeats its sequence at least once";
+  // P11: at least once.
+  if (repeats == 0 || repeats > mostRepeats)
+    return emitError() << "a plan repeats its sequence " << repeats
+                       << " times when it should be 1 to " << mostRepeats;
   return success();
 }
 
@@ -95,6 +98,7 @@ void FractionAttr::print(AsmPrinter &printer) const {
 
 LogicalResult ClockAttr::verify(EmitError emitError, Fraction dt,
                                 TimeUnit unit) {
+  // D3, D4, D5: a clock that ticks.
   if (llvm::Expected<Clock> clock = Clock::make(dt, unit); !clock)
     return emitError() << llvm::toString(clock.takeError());
   return success();

@@ -7,6 +7,7 @@
 //===----------------------------------------------------------------------===//
 
 #include "lull/IR/Assembly.h"
+#include "lull/Timing/Fault.h"
 
 #include "mlir/IR/Builders.h"
 
@@ -26,6 +27,7 @@ ParseResult lull::parseAction(AsmParser &parser, Action &action) {
       return success();
     }
   }
+  // D31: what a device can play.
   if (word != "rotation")
     return parser.emitError(loc)
            << "expected rotation(TURN, PHASE), equatorial or frame";
@@ -33,6 +35,7 @@ ParseResult lull::parseAction(AsmParser &parser, Action &action) {
   if (parser.parseLParen() || parsePhase(parser, turn) || parser.parseComma() ||
       parsePhase(parser, phase) || parser.parseRParen())
     return failure();
+  // D30: part of a turn.
   if (turn.isZero() || turn > Fraction(1) || turn < Fraction(-1))
     return parser.emitError(loc)
            << "turn is " << turn.str()
@@ -87,6 +90,7 @@ ParseResult lull::parseGrid(OpAsmParser &parser, ClockAttr &clock,
   if (parser.parseKeyword(&unitText))
     return failure();
   std::optional<TimeUnit> unit = parseTimeUnit(unitText);
+  // D4: a unit of seconds.
   if (!unit)
     return parser.emitError(unitLoc)
            << "unknown unit '" << unitText << "': expected ns, us, ms or s";
@@ -177,10 +181,10 @@ ParseResult lull::parseOn(OpAsmParser &parser, DenseI64ArrayAttr &on,
       return failure();
     }
     int64_t length = sites.size() - before;
+    // D18: tuples of one length.
     if (!first && length != count)
-      return parser.emitError(loc)
-             << "found " << length << " sites when the first tuple has "
-             << count;
+      return parser.emitError(loc) << "found " << counted(length, "site")
+                                   << " when the first tuple has " << count;
     count = length;
     first = false;
     return success();
@@ -215,6 +219,7 @@ void lull::printOn(OpAsmPrinter &printer, Operation *, DenseI64ArrayAttr on,
   }
 }
 
+// D32: the duration of an operation is not optional.
 ParseResult lull::parseLength(OpAsmParser &parser, DurationAttr &duration) {
   Duration value;
   if (parseDuration(parser, value))

@@ -35,7 +35,8 @@ private:
   LogicalResult fail(Operation *line, const Twine &message);
   /// Ticks of a duration; the default where there is none.
   FailureOr<Ticks> ticks(Operation *line, const Device &device,
-                         DurationAttr duration, Ticks otherwise = 0);
+                         DurationAttr duration, StringRef what,
+                         Ticks otherwise = 0);
   /// A probability of error, if stated.
   FailureOr<std::optional<double>> rate(Operation *line,
                                         std::optional<APFloat> value);
@@ -59,12 +60,14 @@ LogicalResult Converter::take(Operation *line, llvm::Error error) {
 }
 
 FailureOr<Ticks> Converter::ticks(Operation *line, const Device &device,
-                                  DurationAttr duration, Ticks otherwise) {
+                                  DurationAttr duration, StringRef what,
+                                  Ticks otherwise) {
   if (!duration)
     return otherwise;
+  // D25: on the clock, as in a program.
   llvm::Expected<Ticks> value = device.clock().toTicks(duration.getValue());
   if (!value)
-    return take(line, value.takeError());
+    return fail(line, what + ": " + llvm::toString(value.takeError()));
   return *value;
 }
 
@@ -73,6 +76,7 @@ FailureOr<std::optional<double>> Converter::rate(Operation *line,
   if (!value)
     return std::optional<double>();
   double number = value->convertToDouble();
+  // D11: a probability.
   if (!(number >= 0 && number <= 1))
     return fail(line,
                 "error " + spellReal(number) + " is no probability, 0 to 1");
@@ -80,10 +84,11 @@ FailureOr<std::optional<double>> Converter::rate(Operation *line,
 }
 
 LogicalResult Converter::grid(Device &device) {
-  FailureOr<Ticks> step = ticks(op, device, op.getStepAttr(), 1);
-  FailureOr<Ticks> gap = ticks(op, device, op.getGapAttr(), 0);
+  FailureOr<Ticks> step = ticks(op, device, op.getStepAttr(), "step", 1);
+  FailureOr<Ticks> gap = ticks(op, device, op.getGapAttr(), "gap");
   if (failed(step) || failed(gap))
     return failure();
+  // D6, D7: a grid that moves forward.
   return take(op, device.setGrid(*step, *gap));
 }
 
@@ -95,6 +100,7 @@ LogicalResult Converter::site(Device &device, SiteOp line) {
                                  std::pair(line.getEchoAttr(), &site.echo)}) {
     if (!attribute)
       continue;
+    // D10: a calibration time is positive.
     if (attribute.getValue().amount() <= 0)
       return fail(line, "calibration time " + attribute.getValue().str() +
                             " is not positive");
@@ -113,8 +119,10 @@ LogicalResult Converter::coupler(Device &device, CouplerOp line) {
   coupler.second = line.getSecond();
   if (std::optional<APFloat> zz = line.getZz()) {
     coupler.zzKilohertz = zz->convertToDouble();
+    // D15: a finite coupling.
     if (!std::isfinite(*coupler.zzKilohertz))
-      return fail(line, "zz is not a finite number");
+      return fail(line, "zz " + spellReal(*coupler.zzKilohertz) +
+                            " is not a finite number");
   }
   return take(line, device.addCoupler(coupler));
 }
@@ -125,7 +133,8 @@ LogicalResult Converter::operation(Device &device, OperationOp line) {
   entry.arity = line.getArity();
   ArrayRef<int64_t> sites = line.getOn();
   // The line's own verifier may not have run, or has had its say.
-  if (line.getArity() < 1 || sites.size() % entry.arity)
+  if (line.getArity() < 1 || line.getArity() > OperationOp::mostQubits ||
+      sites.size() % entry.arity)
     return failure();
   for (size_t i = 0; i < sites.size(); i += entry.arity)
     entry.on.emplace_back(sites.begin() + i, sites.begin() + i + entry.arity);
@@ -133,20 +142,24 @@ LogicalResult Converter::operation(Device &device, OperationOp line) {
   entry.native = line.getNative();
   if (ActionAttr plays = line.getPlaysAttr()) {
     entry.plays = plays.getValue();
+    // D27: a pulse is on one qubit.
     if (entry.arity != 1)
       return fail(line, "plays a pulse on " + Twine(entry.arity) +
                             " qubits when it should be on 1");
   }
   if (FractionAttr echo = line.getEchoAttr()) {
     entry.echo = echo.getValue();
+    // D28: inside the operation.
     if (*entry.echo <= Fraction(0) || *entry.echo >= Fraction(1))
       return fail(line, "echo at " + entry.echo->str() +
                             " is outside the operation, 0 to 1");
+    // D29: of two qubits.
     if (entry.arity != 2)
       return fail(line, "has an echo with " + Twine(entry.arity) +
                             " qubits when only pairs have");
   }
-  FailureOr<Ticks> length = ticks(line, device, line.getDurationAttr());
+  FailureOr<Ticks> length =
+      ticks(line, device, line.getDurationAttr(), entry.name);
   FailureOr<std::optional<double>> error = rate(line, line.getError());
   if (failed(length) || failed(error))
     return failure();
@@ -155,7 +168,25 @@ LogicalResult Converter::operation(Device &device, OperationOp line) {
   return take(line, device.addOperation(std::move(entry)));
 }
 
+/// Whether a line has what its kind cannot be read without. A function is
+/// verified against its device in no fixed order with the device itself, so
+/// this may see lines that are yet to be refused.
+static bool isComplete(Operation *line) {
+  if (auto site = dyn_cast<SiteOp>(line))
+    return bool(site.getSiteAttr());
+  if (auto coupler = dyn_cast<CouplerOp>(line))
+    return coupler.getFirstAttr() && coupler.getSecondAttr();
+  if (auto operation = dyn_cast<OperationOp>(line))
+    return operation.getLabelAttr() && operation.getOnAttr() &&
+           operation.getArityAttr() && operation.getDurationAttr();
+  return true;
+}
+
 FailureOr<Device> Converter::run() {
+  if (!op.getClockAttr() || !op.getSymNameAttr() || op.getBody().empty() ||
+      !llvm::all_of(op.getBody().front(),
+                    [](Operation &line) { return isComplete(&line); }))
+    return failure();
   llvm::Expected<Clock> clock =
       Clock::make(op.getClock().getDt(), op.getClock().getUnit());
   if (!clock)
@@ -182,16 +213,10 @@ FailureOr<Device> lull::buildDevice(DeviceOp op, bool quiet) {
   return Converter(op, quiet).run();
 }
 
-DeviceOp lull::lookupDevice(Operation *op) {
-  for (Operation *at = op; at; at = at->getParentOp()) {
-    auto symbol =
-        at->getAttrOfType<FlatSymbolRefAttr>(LullDialect::deviceAttrName);
-    if (!symbol)
-      continue;
-    auto device = SymbolTable::lookupNearestSymbolFrom<DeviceOp>(at, symbol);
-    if (!device)
-      op->emitError("unknown device ") << symbol;
-    return device;
-  }
-  return {};
+Operation *lull::deviceHolder(Operation *op, FlatSymbolRefAttr &symbol) {
+  for (Operation *at = op; at; at = at->getParentOp())
+    if ((symbol =
+             at->getAttrOfType<FlatSymbolRefAttr>(LullDialect::deviceAttrName)))
+      return at;
+  return nullptr;
 }

@@ -19,6 +19,7 @@ using namespace mlir;
 #include "lull/IR/LullDeviceOps.cpp.inc"
 
 LogicalResult DeviceOp::verifyRegions() {
+  // D1, D2: lines and nothing else (the other half is a trait of the lines).
   for (Operation &line : getBody().front())
     if (!isa<SiteOp, CouplerOp, OperationOp>(line)) {
       InFlightDiagnostic diag =
@@ -33,16 +34,20 @@ LogicalResult DeviceOp::verifyRegions() {
 
 LogicalResult OperationOp::verify() {
   int64_t arity = getArity();
-  if (arity < 1)
+  // D17: on a qubit.
+  if (arity < 1 || arity > mostQubits)
     return emitOpError() << "is for " << arity
-                         << " qubits when it should be for one or more";
+                         << " qubits when it should be for 1 to " << mostQubits;
+  // D18: whole tuples.
   if (getOn().size() % arity)
     return emitOpError() << "lists " << getOn().size()
                          << " sites, which is no multiple of its " << arity
                          << " qubits";
+  // D19: only a pair has another order.
   if (getSymmetric() && arity != 2)
     return emitOpError() << "is symmetric with " << arity
                          << " qubits when only pairs can be";
+  // D16: a name.
   if (getLabel().empty())
     return emitOpError("has an empty name");
   return success();
@@ -53,10 +58,13 @@ LogicalResult SequenceOp::verify() {
   // the exact arithmetic of repeats.
   constexpr int64_t most = 1000000;
   size_t count = getPhases().size();
+  // U1: a pulse.
   if (count == 0)
     return emitOpError("has no pulses");
+  // U2: one of the two.
   if (bool(getInstants()) == bool(getFormula()))
     return emitOpError("has its instants either as fractions or by a formula");
+  // U3: phases within bounds.
   for (auto [index, phase] :
        llvm::enumerate(getPhases().getAsRange<FractionAttr>()))
     if (Fraction value = phase.getValue(); value.denominator() > most ||
@@ -64,8 +72,13 @@ LogicalResult SequenceOp::verify() {
                                            value < Fraction(-most))
       return emitOpError() << "phase " << value.str() << " of pulse "
                            << index + 1 << " goes beyond " << most;
-  if (!getInstants())
+  if (!getInstants()) {
+    // U11: what the custom form can write.
+    if (!isBareWord(*getFormula()))
+      return emitOpError() << "formula '" << *getFormula() << "' is not a word";
     return success();
+  }
+  // U4: as many as phases.
   if (getInstants()->size() != count)
     return emitOpError() << "has " << count << " phases and "
                          << getInstants()->size() << " instants";
@@ -73,12 +86,15 @@ LogicalResult SequenceOp::verify() {
   for (auto [index, instant] :
        llvm::enumerate(getInstants()->getAsRange<FractionAttr>())) {
     Fraction value = instant.getValue();
+    // U5: instants within bounds.
     if (value.denominator() > most)
       return emitOpError() << "instant " << value.str() << " of pulse "
                            << index + 1 << " goes beyond 1/" << most;
+    // U6: in the window.
     if (value < Fraction(0) || value > Fraction(1))
       return emitOpError() << "instant " << value.str() << " of pulse "
                            << index + 1 << " is outside the window, 0 to 1";
+    // U7: in order.
     if (value < previous)
       return emitOpError() << "instant " << value.str() << " of pulse "
                            << index + 1 << " is before " << previous.str()

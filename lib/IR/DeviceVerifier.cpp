@@ -16,7 +16,7 @@ using namespace mlir;
 
 namespace {
 
-/// Constraints Q3 to Q5 and T3, over one function.
+/// What depends on the device, over one function.
 class Verifier {
 public:
   Verifier(Operation *function, const Device &device)
@@ -50,6 +50,7 @@ void Verifier::checkOp(TimedOpInterface op) {
   bool known = true;
   for (std::optional<SiteId> site : on) {
     known &= site && device.hasSite(*site);
+    // Q3: a site of the device.
     if (site && !device.hasSite(*site) && missing.insert(*site).second) {
       ++errors;
       emitNoSite(op, *site, device);
@@ -57,6 +58,7 @@ void Verifier::checkOp(TimedOpInterface op) {
   }
   if (known && on.size() == 2) {
     SiteId first = *on[0], second = *on[1];
+    // Q4, Q5: two sites, and coupled if a gate is to act on them.
     if (first == second)
       error(op) << "both qubits are on site " << first;
     else if (op.getOperationKind() == OperationKind::Gate &&
@@ -64,7 +66,14 @@ void Verifier::checkOp(TimedOpInterface op) {
       error(op) << "sites " << first << " and " << second << " of device '"
                 << device.name() << "' are not coupled";
   }
-  // A number of dt is always on the clock.
+  if (known && on.size() > 2) {
+    llvm::SmallDenseSet<SiteId, 8> seen;
+    // Q4: the same for more of them.
+    for (std::optional<SiteId> site : on)
+      if (!seen.insert(*site).second)
+        error(op) << "acts twice on site " << *site;
+  }
+  // T3, T8: on the clock, as every number of dt is.
   Duration duration = op.getDuration();
   if (!duration.isSet() || duration.unit() == TimeUnit::dt)
     return;

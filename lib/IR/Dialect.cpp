@@ -44,6 +44,7 @@ struct BytecodeInterface : public BytecodeDialectInterface {
     auto version = std::make_unique<Version>();
     if (failed(reader.readVarInt(version->number)))
       return nullptr;
+    // P12: a version that this code knows.
     if (version->number != currentVersion) {
       reader.emitError() << "lull bytecode version is " << version->number
                          << " when it should be " << currentVersion;
@@ -95,29 +96,39 @@ void LullDialect::initialize() {
 // Attributes on other operations
 //===----------------------------------------------------------------------===//
 
-/// Checks `lull.device` (D2, and D5 to D7 by way of the device).
+/// Checks `lull.device`, and the function against the device.
 static LogicalResult verifyDeviceUse(Operation *op, Attribute value) {
   auto symbol = dyn_cast<FlatSymbolRefAttr>(value);
+  // A1: a flat symbol.
   if (!symbol)
     return op->emitError("'lull.device' must be a symbol such as @barley but "
                          "is ")
            << value;
   Operation *found = SymbolTable::lookupNearestSymbolFrom(op, symbol);
+  // A2: of something.
   if (!found)
     return op->emitError("unknown device ") << symbol;
   auto device = dyn_cast<DeviceOp>(found);
+  // A3: that is a device.
   if (!device) {
     InFlightDiagnostic diag = op->emitError() << symbol << " is not a device";
     diag.attachNote(found->getLoc()) << "it is this operation";
     return diag;
   }
-  // A module may carry the attribute for all its functions; each function is
-  // then checked when it is timed.
-  if (!isa<FunctionOpInterface>(op))
-    return success();
   // A device that is wrong itself has its own errors.
   FailureOr<Device> plain = buildDevice(device, /*quiet=*/true);
-  return failed(plain) ? success() : verifyAgainstDevice(op, *plain);
+  if (failed(plain))
+    return success();
+  if (isa<FunctionOpInterface>(op))
+    return verifyAgainstDevice(op, *plain);
+  // A module speaks for the functions in it that do not speak for themselves.
+  bool sound = true;
+  op->walk([&](FunctionOpInterface function) {
+    FlatSymbolRefAttr named;
+    if (deviceHolder(function, named) == op)
+      sound &= succeeded(verifyAgainstDevice(function, *plain));
+  });
+  return success(sound);
 }
 
 LogicalResult LullDialect::verifyOperationAttribute(Operation *op,
@@ -127,23 +138,27 @@ LogicalResult LullDialect::verifyOperationAttribute(Operation *op,
   if (name == deviceAttrName)
     return verifyDeviceUse(op, value);
   if (name == stateAttrName) {
+    // A4: a state.
     if (!isa<WindowStateAttr>(value))
       return op->emitError("'lull.state' must be a #lull.state but is ")
              << value;
     return success();
   }
   if (name == planAttrName) {
+    // A5: a plan.
     if (!isa<PlanAttr>(value))
       return op->emitError("'lull.plan' must be a #lull.plan but is ") << value;
     return success();
   }
   if (name == protectAttrName) {
+    // A6: a name, a symbol or a plan.
     if (!isa<StringAttr, FlatSymbolRefAttr, PlanAttr>(value))
       return op->emitError("'lull.protect' must be the name of a sequence, its "
                            "symbol, a #lull.plan or \"none\" but is ")
              << value;
     return success();
   }
+  // A7: nothing else.
   return op->emitError("unknown attribute '")
          << name
          << "': on operations there are lull.device, lull.protect, lull.state "
@@ -154,11 +169,13 @@ LogicalResult LullDialect::verifyRegionArgAttribute(Operation *op,
                                                     unsigned region,
                                                     unsigned argument,
                                                     NamedAttribute attribute) {
+  // A9: nothing but a site.
   if (attribute.getName() != siteAttrName)
     return op->emitError("unknown attribute '")
-           << attribute.getName() << "' on argument " << argument
+           << attribute.getName().getValue() << "' on argument " << argument
            << ": there is lull.site";
   auto site = dyn_cast<IntegerAttr>(attribute.getValue());
+  // A8: a number that a site can have.
   if (!site || !site.getType().isSignlessInteger(64) || site.getInt() < 0)
     return op->emitError("'lull.site' must be a number of a site such as 3 : "
                          "i64 but is ")

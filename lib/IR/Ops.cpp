@@ -9,6 +9,7 @@
 #include "lull/IR/Ops.h"
 
 #include "lull/IR/Assembly.h"
+#include "lull/Timing/Fault.h"
 
 #include "mlir/IR/DialectImplementation.h"
 #include "llvm/ADT/DenseSet.h"
@@ -70,7 +71,7 @@ static LogicalResult verifyQubits(Operation *op, OperandRange qubits) {
   return success();
 }
 
-/// S1: what carries a qubit on has the type of the qubit.
+/// S1, S2: what carries qubits on has their types and their number.
 static LogicalResult verifyCarried(Operation *op, TypeRange qubits,
                                    TypeRange carried) {
   if (carried.empty())
@@ -97,6 +98,7 @@ static void collectOperands(MutableArrayRef<OpOperand> operands,
 //===----------------------------------------------------------------------===//
 
 LogicalResult QubitOp::verify() {
+  // Q6: not negative.
   if (int64_t site = getSite(); site < 0)
     return emitOpError() << "site " << site << " is negative";
   return success();
@@ -126,14 +128,20 @@ LogicalResult GateOp::verify() {
       failed(verifyNoStray(*this, {"angles"})) ||
       failed(verifyQubits(*this, getQubits())))
     return failure();
+  // P8: a name.
   if (getGate().empty())
     return emitOpError("has an empty name");
   const AngleList &angles = getAngles();
   if (!angles.stated)
     return emitOpError("the property 'angles' is missing");
   for (auto [index, angle] : llvm::enumerate(angles.angles)) {
-    if (angle.isMissing() || !std::isfinite(angle.value()))
-      return emitOpError() << "angle " << index << " is not a finite number";
+    // P5: finite.
+    if (angle.isMissing())
+      return emitOpError() << "angle " << index << " is missing";
+    if (!std::isfinite(angle.value()))
+      return emitOpError() << "angle " << index << ", " << angle.str()
+                           << ", is not a finite number";
+    // P6: room for sums.
     if (angle.isExact() && !Angle::isSound(angle.multiple()))
       return emitOpError() << "angle " << index << ", " << angle.str()
                            << ", goes beyond " << Angle::mostTerm;
@@ -200,7 +208,8 @@ void DelayOp::collectQubits(SmallVectorImpl<OpOperand *> &qubits) {
   collectOperands((*this)->getOpOperands(), qubits);
 }
 Value DelayOp::getCarrier(unsigned index) {
-  return getCarried().empty() ? Value() : getCarried()[index];
+  // The operation may be one that is yet to be refused.
+  return index < getCarried().size() ? Value(getCarried()[index]) : Value();
 }
 
 //===----------------------------------------------------------------------===//
@@ -253,9 +262,11 @@ LogicalResult PulseOp::verify() {
     return failure();
   if (getPhase().isMissing())
     return emitOpError("the property 'phase' is missing");
+  // P7: exact.
   if (!getPhase().isExact())
     return emitOpError() << "phase " << getPhase().str()
                          << " is not an exact multiple of pi";
+  // P6: room for sums.
   if (!Angle::isSound(getPhase().multiple()))
     return emitOpError() << "phase " << getPhase().str() << " goes beyond "
                          << Angle::mostTerm;

@@ -47,6 +47,7 @@ Attribute lull::toAttribute(MLIRContext *context, const Duration &value) {
 LogicalResult lull::fromAttribute(Duration &value, Attribute attribute,
                                   EmitError emitError) {
   auto text = dyn_cast<StringAttr>(attribute);
+  // P3: a string.
   if (!text)
     return emitError() << "expected a duration as a string such as \"35.5 ns\" "
                           "but found "
@@ -55,6 +56,7 @@ LogicalResult lull::fromAttribute(Duration &value, Attribute attribute,
     value = Duration();
     return success();
   }
+  // T4, T5, T6, T7: as in the custom form.
   llvm::Expected<Duration> parsed = Duration::parse(text.getValue());
   if (!parsed)
     return emitError() << llvm::toString(parsed.takeError());
@@ -84,6 +86,7 @@ LogicalResult lull::fromAttribute(Angle &value, Attribute attribute,
   }
   std::optional<Angle> exact =
       text ? parseExactAngle(text.getValue()) : std::nullopt;
+  // P3: a float or a fraction of pi.
   if (!exact)
     return emitError() << "expected an angle as a float or a string such as "
                           "\"1/2 pi\" but found "
@@ -108,6 +111,7 @@ LogicalResult lull::fromAttribute(AngleList &value, Attribute attribute,
     if (text.getValue() == missingText)
       return success();
   auto array = dyn_cast<ArrayAttr>(attribute);
+  // P3: an array.
   if (!array)
     return emitError() << "expected an array of angles but found " << attribute;
   value.stated = true;
@@ -138,6 +142,7 @@ LogicalResult lull::readProperty(DialectBytecodeReader &reader,
           ? llvm::Expected<Duration>(
                 llvm::createStringError("form %" PRIu64, form))
           : Duration::make(amount, unsigned(form >> 4), TimeUnit(form & 15));
+  // P13: a duration that was written.
   if (!made)
     return reader.emitError("invalid duration in bytecode: ")
            << llvm::toString(made.takeError());
@@ -179,6 +184,7 @@ LogicalResult lull::readProperty(DialectBytecodeReader &reader, Angle &value) {
       failed(reader.readSignedVarInt(denominator)))
     return reader.emitError("invalid angle in bytecode");
   llvm::Expected<Fraction> multiple = Fraction::make(numerator, denominator);
+  // P13: an angle that was written.
   if (!multiple)
     return reader.emitError("invalid angle in bytecode: ")
            << llvm::toString(multiple.takeError());

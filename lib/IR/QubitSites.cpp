@@ -9,6 +9,7 @@
 #include "lull/IR/QubitSites.h"
 
 #include "lull/IR/Dialect.h"
+#include "lull/Timing/Fault.h"
 
 #include "mlir/Interfaces/FunctionInterfaces.h"
 
@@ -16,11 +17,13 @@ using namespace lull;
 using namespace mlir;
 
 std::optional<SiteId> lull::originOf(Value qubit, Operation *function) {
+  // Without a host, nobody could build a wait on it, whatever an argument says.
+  const HostInterface *host = hostOf(qubit.getType());
+  if (!host)
+    return std::nullopt;
   auto argument = dyn_cast<BlockArgument>(qubit);
-  if (!argument) {
-    const HostInterface *host = hostOf(qubit.getType());
-    return host ? host->getSite(qubit) : std::nullopt;
-  }
+  if (!argument)
+    return host->getSite(qubit);
   auto callee = dyn_cast<FunctionOpInterface>(function);
   if (!callee || argument.getOwner() != &function->getRegion(0).front())
     return std::nullopt;
@@ -30,6 +33,10 @@ std::optional<SiteId> lull::originOf(Value qubit, Operation *function) {
 }
 
 InFlightDiagnostic lull::emitUnknownSite(Operation *user, Value qubit) {
+  if (!hostOf(qubit.getType()))
+    return user->emitError("takes a value of type ")
+           << qubit.getType()
+           << " as a qubit, which no host dialect says it is";
   if (auto argument = dyn_cast<BlockArgument>(qubit))
     return user->emitError("the site of qubit argument ")
            << argument.getArgNumber()
@@ -44,7 +51,7 @@ InFlightDiagnostic lull::emitNoSite(Operation *at, SiteId site,
                                     const Device &device) {
   return at->emitError("site ")
          << site << " is not on device '" << device.name() << "', which has "
-         << device.sites().size() << " sites";
+         << counted(device.sites().size(), "site");
 }
 
 void QubitSites::read(TimedOpInterface op,
@@ -70,6 +77,7 @@ LogicalResult QubitSites::read(TimedOpInterface op, const Device &device,
   read(op, scratch);
   sites.clear();
   for (auto [site, operand] : llvm::zip(scratch, operands)) {
+    // Q7, Q3: a known site of the device.
     if (!site)
       return emitUnknownSite(op, operand->get());
     if (!device.hasSite(*site))

@@ -51,8 +51,7 @@ static constexpr llvm::StringLiteral Any = "a number from 1";
 
 static const Family Table[] = {
     {"hahn", 0, "", "Hahn 1950",
-     "one pulse; needs a closing pulse, and its width leaves static detuning",
-     HahnNames,
+     "one pulse, so a second one closes it at the end of the window", HahnNames,
      [](Orders orders) { return fixedWord("hahn", orders, "X", "centred"); }},
     {"cp", 1, Any, "Carr and Purcell 1954",
      "the pulses of cpmg: the names differ in the stored state only (cp: "

@@ -10,20 +10,22 @@
 // Any placement is start_k = packed_k + step z_k with whole numbers
 // 0 <= z_1 <= ... <= z_n <= top, where `top` is the slack of the window in
 // steps. The residual depends on the alternating sum of the z alone, which
-// takes every value of a known range; so its best value (or two, of opposite
-// residuals) is known before any search. What is left is least squares over
-// such z with a given alternating sum, which GridSearch.cpp solves exactly in a
-// few passes over the pulses.
+// takes every value of a known range; so its best value (or two, equally far
+// from the sequence's own imbalance) is known before any search. What is left
+// is least squares over such z with a given alternating sum, which
+// GridSearch.cpp solves exactly in a few passes over the pulses.
 //
 // A mirror-symmetric placement is fixed by its first half. Its cost is that of
 // the half with averaged ideals (plus a constant) and its alternating sum twice
 // that of the half (plus a constant): the same problem, solved by the same
 // code. It is taken if its cost is the best one.
 //
-// All costs are whole numbers: ideal starts are counted in units of 1/scale
-// tick, where `scale` makes them whole. Instants without a small common
-// denominator are first rounded to 2^-20 tick as seen from the middle of the
-// window, so that mirror images round to mirror images.
+// All costs are whole numbers: ideal starts and the imbalance are counted in
+// units of 1/scale tick, where `scale` makes them whole. Instants without a
+// small common denominator are first rounded to 2^-20 tick as seen from the
+// middle of the window, so that mirror images round to mirror images. What
+// rounding alone can do to the imbalance is taken for none: else it would
+// decide between placements that are equally good.
 //
 //===----------------------------------------------------------------------===//
 
@@ -61,6 +63,8 @@ struct Setting {
   std::int64_t scale = 2;
   /// Ideal starts minus packed ones, in units.
   llvm::SmallVector<std::int64_t, 16> ideal;
+  /// The sequence's own imbalance, in units.
+  std::int64_t own = 0;
 
   size_t size() const { return widths.size(); }
   GridProblem problem() const {
@@ -182,10 +186,11 @@ double fromMiddle(llvm::ArrayRef<Instant> instants, size_t index) {
   return std::abs(here + there) < Rounding ? (here - there) / 2 : here;
 }
 
-/// Sets the scale and the ideal starts.
+/// Sets the scale, the ideal starts and the imbalance.
 void setIdeal(Setting &setting, const Sequence &sequence) {
   Ticks length = setting.window.length;
   llvm::SmallVector<std::int64_t, 16> places;
+  std::int64_t negligible = 0;
   if (auto common = commonDenominator(sequence.instants, length)) {
     setting.scale = 2 * *common;
     for (const Instant &instant : sequence.instants)
@@ -197,11 +202,19 @@ void setIdeal(Setting &setting, const Sequence &sequence) {
     while (parts > 1 && length > LongestScaled / 2 / parts)
       parts /= 2;
     setting.scale = 2 * parts;
+    // Rounding shifts a place by a unit, and twice that counts; as much again
+    // for the errors of the instants themselves.
+    negligible = 4 * std::int64_t(setting.size());
     for (size_t i = 0, e = setting.size(); i != e; ++i)
       places.push_back(parts * length +
                        2 * std::llround(fromMiddle(sequence.instants, i) *
                                         double(length) * double(parts)));
   }
+  // The residual of pulses without width.
+  llvm::SmallVector<Ticks, 16> none(places.size(), 0);
+  setting.own = residualOf(places, none, setting.scale * length);
+  if (std::abs(setting.own) <= negligible)
+    setting.own = 0;
   std::int64_t before =
       sequence.anchor == Anchor::Centre ? setting.scale / 2 : setting.scale;
   for (auto [place, width, packed] :
@@ -209,13 +222,15 @@ void setIdeal(Setting &setting, const Sequence &sequence) {
     setting.ideal.push_back(place - width * before - packed * setting.scale);
 }
 
-/// The alternating sums of z with the smallest |residual|: one, or two with
-/// opposite residuals.
+/// The alternating sums of z with the residual nearest to the imbalance: one,
+/// or two on either side of it.
 llvm::SmallVector<std::int64_t, 2> bestSums(const Setting &setting) {
-  // residual = atZero - 2 step sum.
-  Ticks atZero =
-      residualOf(setting.packed, setting.widths, setting.window.length);
-  Int128 stride = Int128(2) * setting.window.step;
+  // scale residual - own = atZero - 2 scale step sum.
+  Int128 atZero =
+      Int128(setting.scale) *
+          residualOf(setting.packed, setting.widths, setting.window.length) -
+      setting.own;
+  Int128 stride = Int128(2) * setting.scale * setting.window.step;
   SumRange range = sumRange(setting.size(), setting.top);
   auto clamped = [&](Int128 sum) {
     return std::int64_t(
@@ -225,13 +240,13 @@ llvm::SmallVector<std::int64_t, 2> bestSums(const Setting &setting) {
   if (down * stride > atZero)
     --down;
   std::int64_t low = clamped(down), high = clamped(down + 1);
-  auto size = [&](std::int64_t sum) {
-    Int128 residual = atZero - stride * sum;
-    return residual < 0 ? -residual : residual;
+  auto miss = [&](std::int64_t sum) {
+    Int128 difference = atZero - stride * sum;
+    return difference < 0 ? -difference : difference;
   };
-  if (low == high || size(low) < size(high))
+  if (low == high || miss(low) < miss(high))
     return {low};
-  if (size(high) < size(low))
+  if (miss(high) < miss(low))
     return {high};
   return {low, high};
 }
@@ -283,7 +298,7 @@ bool isMirror(llvm::ArrayRef<Ticks> starts, llvm::ArrayRef<Ticks> widths,
   return true;
 }
 
-/// A placement with the smallest |residual|.
+/// A placement with the residual nearest to the imbalance.
 struct Candidate {
   std::vector<Ticks> starts;
   Int128 cost;

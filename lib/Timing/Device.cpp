@@ -155,8 +155,10 @@ Device &Device::operator=(Device &&) = default;
 Device::~Device() = default;
 
 llvm::Error Device::setGrid(Ticks step, Ticks leastGap) {
+  // D6: a step.
   if (step < 1)
     return fault("step is {} dt when it should be at least 1 dt", step);
+  // D7: a gap.
   if (leastGap < 0)
     return fault("least gap is {} dt when it should not be negative", leastGap);
   startStep = step;
@@ -166,9 +168,11 @@ llvm::Error Device::setGrid(Ticks step, Ticks leastGap) {
 
 llvm::Error Device::addSite(Site site) {
   constexpr SiteId most = std::numeric_limits<std::uint32_t>::max();
+  // D8: a number.
   if (site.number < 0 || site.number > most)
     return fault("site number is {} when it should be 0 to {}", site.number,
                  most);
+  // D9: once.
   if (!siteIndex.try_emplace(site.number, siteList.size()).second)
     return fault("site {} is listed twice", site.number);
   siteList.push_back(std::move(site));
@@ -177,13 +181,16 @@ llvm::Error Device::addSite(Site site) {
 
 llvm::Error Device::addCoupler(Coupler coupler) {
   for (SiteId number : {coupler.first, coupler.second})
+    // D12: between sites.
     if (!hasSite(number))
       return fault("coupler ({}, {}) needs site {}, which is not there ({})",
                    coupler.first, coupler.second, number, spellKnown(siteList));
+  // D13: two of them.
   if (coupler.first == coupler.second)
     return fault("coupler ({}, {}) joins a site to itself", coupler.first,
                  coupler.second);
   SitePair key = std::minmax(coupler.first, coupler.second);
+  // D14: once.
   if (!couplerIndex.try_emplace(key, couplerList.size()).second)
     return fault("coupler ({}, {}) is listed twice", coupler.first,
                  coupler.second);
@@ -198,14 +205,17 @@ llvm::Error Device::checkSites(const OperationEntry &entry) const {
       return fault("operation '{}' takes {}, but is listed for {} of them",
                    entry.name, spellCount(entry.arity, "qubit"), sites.size());
     for (SiteId number : sites)
+      // D20: on sites.
       if (!hasSite(number))
         return fault("operation '{}' is listed for {}, but there is no site {} "
                      "({})",
                      entry.name, spellSites(sites), number,
                      spellKnown(siteList));
+    // D21: on different ones.
     if (std::optional<SiteId> number = findRepeated(sites))
       return fault("operation '{}' is listed for {} with site {} twice",
                    entry.name, spellSites(sites), *number);
+    // D22: on coupled ones.
     if (sites.size() == 2 && !coupled(sites[0], sites[1]))
       return fault("operation '{}' is listed for {}, but sites {} and {} are "
                    "not coupled",
@@ -215,17 +225,21 @@ llvm::Error Device::checkSites(const OperationEntry &entry) const {
 }
 
 llvm::Error Device::addOperation(OperationEntry entry) {
+  // D16: a name.
   if (entry.name.empty())
     return fault("an operation has no name");
+  // D17: a qubit.
   if (entry.arity == 0)
     return fault("operation '{}' takes no qubits", entry.name);
   if (entry.duration < 0)
     return fault("operation '{}' takes {} dt, which is negative", entry.name,
                  entry.duration);
+  // D26: frames take no time.
   if (entry.plays.kind == Action::Kind::Frame && entry.duration != 0)
     return fault("operation '{}' is a frame change but takes {} dt when it "
                  "should take 0 dt",
                  entry.name, entry.duration);
+  // D19: only a pair has another order.
   if (entry.symmetric && entry.arity != 2)
     return fault("operation '{}' is symmetric, which is for 2 qubits, but "
                  "takes {}",
@@ -235,9 +249,11 @@ llvm::Error Device::addOperation(OperationEntry entry) {
 
   auto known = byName.find(entry.name);
   NamedEntries *named = known == byName.end() ? nullptr : known->second.get();
+  // D23: one number of qubits.
   if (named && named->arity != entry.arity)
     return fault("operation '{}' is listed with {} and with {}", entry.name,
                  spellCount(named->arity, "qubit"), entry.arity);
+  // D24: one line for any sites, and one for each tuple.
   if (named && named->any && entry.on.empty())
     return fault("operation '{}' is listed twice for {}", entry.name,
                  spellAny(entry.arity));

@@ -97,6 +97,7 @@ std::vector<Violation> Problem::check() const {
         report(Rule::UnknownResource, op).resource = resource;
         continue;
       }
+      // Q4: no site twice.
       if (stamp[resource] == op)
         report(Rule::ResourceTwice, op).resource = resource;
       stamp[resource] = op;

@@ -130,6 +130,7 @@ llvm::Expected<Duration> Duration::parse(llvm::StringRef number,
   llvm::StringRef whole = rest.take_while(llvm::isDigit);
   rest = rest.drop_front(whole.size());
   bool point = rest.consume_front(".");
+  // T5: decimal.
   if (whole.empty() || (point && rest.empty()) ||
       !llvm::all_of(rest, llvm::isDigit) || (!point && !rest.empty()))
     return fault("'{}' is not a decimal number", number.str());
@@ -137,8 +138,10 @@ llvm::Expected<Duration> Duration::parse(llvm::StringRef number,
   whole = whole.ltrim('0');
   llvm::StringRef behind = rest.rtrim('0');
   llvm::StringRef leading = whole.empty() ? behind.ltrim('0') : behind;
+  // T7: digits that fit 64 bits.
   if (behind.size() > mostDigits || whole.size() + leading.size() > mostDigits)
     return fault("'{}' needs more than {} digits", number.str(), mostDigits);
+  // T6: whole.
   if (unit == TimeUnit::dt && !behind.empty())
     return fault("'{} dt' is not a whole number of dt", number.str());
 
@@ -165,6 +168,7 @@ llvm::Expected<Duration> Duration::parse(llvm::StringRef text) {
   llvm::Expected<Duration> reading = parse(number, TimeUnit::s);
   if (!reading)
     return reading.takeError();
+  // T4: a unit.
   if (name.empty())
     return fault("'{}' has no unit ({})", number.str(), units.str());
   return fault("'{}' is not a unit of time ({})", name.str(), units.str());
@@ -212,14 +216,17 @@ std::string Duration::str() const {
 //===----------------------------------------------------------------------===//
 
 llvm::Expected<Clock> Clock::make(Fraction dt, TimeUnit unit) {
+  // D4: a unit of seconds.
   if (!isSeconds(unit))
     return fault("dt is given in '{}' when it should be in ns, us, ms or s",
                  spell(unit).str());
+  // D3: positive.
   if (dt <= Fraction(0))
     return fault("dt is {} {} when it should be positive", dt.str(),
                  spell(unit).str());
   std::optional<Fraction> seconds =
       dt.over(Fraction(powerOfTen(exponentOf(unit))));
+  // D5: exact in seconds.
   if (!seconds)
     return fault("dt of {} {} is not a fraction of 64 bits in seconds",
                  dt.str(), spell(unit).str());
@@ -238,6 +245,7 @@ llvm::Expected<Ticks> Clock::toTicks(const Duration &duration) const {
   if (!duration.isSet())
     return fault("duration is {} when it should be a time",
                  duration.isMissing() ? "missing" : "unset");
+  // T1: not negative.
   if (duration.isNegative())
     return fault("duration {} is negative", duration.str());
   if (duration.unit() == TimeUnit::dt)
@@ -265,9 +273,11 @@ llvm::Expected<Ticks> Clock::toTicks(const Duration &duration) const {
     divisor = ~Wide(0);
   Wide whole = dividend / divisor;
   Wide rest = dividend % divisor;
+  // T8: in 64 bits.
   if (whole > Wide(mostTicks) - (rest != 0))
     return fault("duration {} does not fit in 64 bits of dt ({})",
                  duration.str(), str());
+  // T3: a whole number of ticks.
   if (rest == 0)
     return Ticks(whole);
   return fault("{} is not a whole number of dt ({}): it is {} dt, between {} "

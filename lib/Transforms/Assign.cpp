@@ -7,7 +7,8 @@
 //===----------------------------------------------------------------------===//
 
 #include "lull/Analysis/Devices.h"
-#include "lull/Analysis/Timeline.h"
+#include "lull/Analysis/ProgramReader.h"
+#include "lull/Sequence/Catalogue.h"
 #include "lull/Transforms/Functions.h"
 #include "lull/Transforms/Passes.h"
 #include "lull/Transforms/Plans.h"
@@ -58,21 +59,24 @@ struct Window {
 /// Decides the windows of one function.
 class Decider {
 public:
-  Decider(const Policy &policy, const Timeline &timeline, Remarks &remarks)
-      : policy(policy), program(timeline.read()), device(program.device()),
-        remarks(remarks), plans(device, program.function()),
-        protectName(StringAttr::get(program.function()->getContext(),
+  Decider(const Policy &policy, Operation *function, const Device &device,
+          Remarks &remarks)
+      : policy(policy), function(function), device(device), remarks(remarks),
+        plans(device, function),
+        protectName(StringAttr::get(function->getContext(),
                                     LullDialect::protectAttrName)) {}
 
+  LogicalResult run();
+
+private:
   /// Turns options into ticks of this device.
   LogicalResult prepare();
   LogicalResult decide(const Window &window);
-
-private:
   LogicalResult decideByWish(const Window &window, Attribute wish);
   /// Puts the plan on the window if it fits.
   LogicalResult tryPlan(const Window &window, PlanAttr plan);
-  /// A plan of `sequence` with the repeats that the options ask for.
+  /// A plan of `sequence` with the repeats that the options ask for; null if
+  /// the window was left because they ask for too many.
   FailureOr<PlanAttr> makePlan(const Window &window, Attribute sequence);
   void leave(const Window &window, const std::string &why);
   LogicalResult fail(const Window &window, llvm::Error error) {
@@ -83,7 +87,7 @@ private:
   }
 
   const Policy &policy;
-  const TimedProgram &program;
+  Operation *function;
   const Device &device;
   Remarks &remarks;
   Plans plans;
@@ -103,12 +107,18 @@ LogicalResult Decider::prepare() {
                               std::pair(&policy.leastWindow, &least)}) {
     if (!*option)
       continue;
+    // W25: on the clock.
     llvm::Expected<Ticks> value = device.clock().toTicks(**option);
     if (!value)
-      return program.function()->emitError("in an option of lull-assign: ")
+      return function->emitError("in an option of lull-assign: ")
              << llvm::toString(value.takeError());
     *slot = *value;
   }
+  // A sequence that is not there is an error even if no window wants it.
+  if (policy.sequence)
+    if (auto base = plans.base(policy.sequence); !base)
+      return function->emitError("in an option of lull-assign: ")
+             << llvm::toString(base.takeError());
   return success();
 }
 
@@ -132,10 +142,22 @@ FailureOr<PlanAttr> Decider::makePlan(const Window &window,
       return fail(window, base.takeError());
     // The largest number of repeats whose pulses are `spacing` apart on
     // average, so that length / (repeats * pulses) >= spacing.
-    Ticks apart = spacing * Ticks((*base)->size());
-    repeats = unsigned(std::max<Ticks>(1, window.length / apart));
+    Ticks apart = 0;
+    if (__builtin_mul_overflow(spacing, Ticks((*base)->size()), &apart))
+      apart = window.length;
+    Ticks wanted =
+        std::max<Ticks>(1, window.length / std::max<Ticks>(1, apart));
+    // More than any sequence may have: no repeats say that.
+    repeats = wanted > Ticks(PlanAttr::mostRepeats) ? 0 : unsigned(wanted);
+    if (repeats == 0 || repeats * (*base)->size() > MostPulses) {
+      leave(window,
+            fmt::format("a spacing of {} asks for {} repeats of {}, "
+                        "more than {} pulses",
+                        ticks(spacing), wanted, (*base)->name, MostPulses));
+      return PlanAttr();
+    }
   }
-  return PlanAttr::get(program.function()->getContext(), sequence, repeats,
+  return PlanAttr::get(function->getContext(), sequence, repeats,
                        policy.alternating);
 }
 
@@ -163,7 +185,9 @@ LogicalResult Decider::decideByWish(const Window &window, Attribute wish) {
   if (plan)
     return tryPlan(window, plan);
   FailureOr<PlanAttr> made = makePlan(window, wish);
-  return failed(made) ? failure() : tryPlan(window, *made);
+  if (failed(made))
+    return failure();
+  return *made ? tryPlan(window, *made) : success();
 }
 
 LogicalResult Decider::decide(const Window &window) {
@@ -190,7 +214,28 @@ LogicalResult Decider::decide(const Window &window) {
     return success();
   }
   FailureOr<PlanAttr> plan = makePlan(window, policy.sequence);
-  return failed(plan) ? failure() : tryPlan(window, *plan);
+  if (failed(plan))
+    return failure();
+  return *plan ? tryPlan(window, *plan) : success();
+}
+
+LogicalResult Decider::run() {
+  ProgramReader reader(function, device);
+  FailureOr<Block *> body = reader.body();
+  if (failed(body) || failed(prepare()))
+    return failure();
+  for (Operation &op : **body) {
+    FailureOr<bool> timed = reader.read(&op);
+    if (failed(timed))
+      return failure();
+    const ProgramReader::Step &step = reader.step();
+    if (!*timed || step.kind != OperationKind::Idle)
+      continue;
+    if (failed(decide({step.op, reader.site(step.qubits.front()), step.start,
+                       step.duration})))
+      return failure();
+  }
+  return success();
 }
 
 //===----------------------------------------------------------------------===//
@@ -207,12 +252,19 @@ LogicalResult AssignPass::initialize(MLIRContext *context) {
   StringRef name = sequence;
   if (name.consume_front("@"))
     policy.sequence = FlatSymbolRefAttr::get(context, name);
-  else if (!name.empty() && name != "none")
+  else if (!name.empty() && name != "none") {
+    if (llvm::Expected<Sequence> known = findSequence(name); !known)
+      return emitError(loc)
+             << "option 'sequence': " << llvm::toString(known.takeError());
     policy.sequence = StringAttr::get(context, name);
-  if (repeats == 0)
-    return emitError(loc) << "option 'repeats' is 0 when it should be 1 or "
-                             "more";
-  if (repeats != 1 && !spacing.empty())
+  }
+  // W22: a number that a plan may have.
+  if (policy.repeats == 0 || policy.repeats > PlanAttr::mostRepeats)
+    return emitError(loc) << "option 'repeats' is " << policy.repeats
+                          << " when it should be 1 to "
+                          << PlanAttr::mostRepeats;
+  // W23: one of the two.
+  if (policy.repeats != 1 && !spacing.empty())
     return emitError(loc)
            << "options 'repeats' and 'spacing' exclude each other";
   for (auto [text, slot, optionName] :
@@ -221,6 +273,7 @@ LogicalResult AssignPass::initialize(MLIRContext *context) {
     if (text->empty())
       continue;
     llvm::Expected<Duration> parsed = Duration::parse(*text);
+    // W24: a positive duration.
     if (!parsed)
       return emitError(loc) << "option '" << optionName
                             << "': " << llvm::toString(parsed.takeError());
@@ -244,34 +297,19 @@ LogicalResult AssignPass::checkSequences() {
 }
 
 void AssignPass::runOnOperation() {
-  getAnalysis<Devices>();
+  const Devices &devices = getAnalysis<Devices>();
   if (failed(checkSequences()))
     return signalPassFailure();
   LogicalResult result = forEachTimedFunction(
       getOperation(), getAnalysisManager(), getArgument(),
-      [&](Operation *, AnalysisManager manager,
+      [&](Operation *function, AnalysisManager,
           Remarks &remarks) -> LogicalResult {
-        const Timeline &timeline = manager.getAnalysis<Timeline>();
-        if (!timeline.isValid())
-          return failure();
-        Decider decider(policy, timeline, remarks);
-        if (failed(decider.prepare()))
-          return failure();
-        const TimedProgram &program = timeline.read();
-        const Problem &problem = program.problem();
-        for (OpId id = 0; id < problem.size(); ++id) {
-          if (problem.kind(id) != OperationKind::Idle)
-            continue;
-          Window window{program.op(id), program.site(problem.occupied(id)[0]),
-                        timeline.start(id), problem.duration(id)};
-          if (failed(decider.decide(window)))
-            return failure();
-        }
-        return success();
+        const Device *device = devices.require(function);
+        return failure(
+            !device ||
+            failed(Decider(policy, function, *device, remarks).run()));
       });
   if (failed(result))
     return signalPassFailure();
-  // Nobody needs the timeline again before operations change, and in large
-  // programs it is large.
   markAnalysesPreserved<Devices>();
 }

@@ -45,7 +45,7 @@ public:
 private:
   LogicalResult emit(PlanAttr plan);
   /// Replaces the idle that was read last.
-  void rewrite(const Player &player, const Placement &placement);
+  LogicalResult rewrite(const Player &player, const Placement &placement);
   void remark(PlanAttr plan, const Player &player, const Placement &placement);
 
   const Device &device;
@@ -61,7 +61,8 @@ private:
 
 } // namespace
 
-void Emitter::rewrite(const Player &player, const Placement &placement) {
+LogicalResult Emitter::rewrite(const Player &player,
+                               const Placement &placement) {
   TimedOpInterface idle = reader.step().op;
   Value qubit = reader.step().operands.front()->get();
   const HostInterface *host = hostOf(qubit.getType());
@@ -73,7 +74,7 @@ void Emitter::rewrite(const Player &player, const Placement &placement) {
   ArrayRef<Ticks> widths = player.widths();
   Ticks now = 0;
   auto wait = [&](Ticks until) {
-    if (until > now)
+    if (until > now && qubit)
       qubit =
           host->buildDelay(builder, loc, qubit, Duration::ticks(until - now));
     now = until;
@@ -81,6 +82,8 @@ void Emitter::rewrite(const Player &player, const Placement &placement) {
   for (size_t i = 0; i < sequence.size(); ++i) {
     wait(placement.starts[i]);
     bool last = i + 1 == sequence.size();
+    if (!qubit)
+      break;
     if (natives.empty()) {
       auto pulse = PulseOp::create(builder, loc, qubit, sequence.phases[i],
                                    Duration::ticks(widths[i]), last, carry);
@@ -91,11 +94,15 @@ void Emitter::rewrite(const Player &player, const Placement &placement) {
     now += widths[i];
   }
   wait(reader.step().duration);
+  // The host could not build what was asked for, and said so.
+  if (!qubit)
+    return failure();
   if (Value carrier = idle.getCarrier(0)) {
     carrier.replaceAllUsesWith(qubit);
-    reader.carryOn(reader.step().qubits.front(), qubit);
+    reader.carryOn(reader.step().qubits.front(), carrier, qubit);
   }
   idle->erase();
+  return success();
 }
 
 void Emitter::remark(PlanAttr plan, const Player &player,
@@ -126,6 +133,7 @@ LogicalResult Emitter::emit(PlanAttr plan) {
     return idle->emitError(llvm::toString(player.takeError()));
   llvm::Expected<const Placement *> placement =
       (*player)->place(plans.window(step.start, step.duration));
+  // W13, W14: pulses that fit.
   if (!placement)
     return idle->emitError("the plan '")
            << (*player)->sequence().name << "' on site " << site
@@ -140,8 +148,7 @@ LogicalResult Emitter::emit(PlanAttr plan) {
     }
   if (remarks.wanted())
     remark(plan, **player, **placement);
-  rewrite(**player, **placement);
-  return success();
+  return rewrite(**player, **placement);
 }
 
 LogicalResult Emitter::run() {

@@ -54,19 +54,24 @@ LogicalResult lull::forEachTimedFunction(
     Operation *function;
     AnalysisManager manager;
     Remarks remarks;
+    LogicalResult result;
   };
   std::vector<Job> jobs;
   // Nesting changes the manager: before any thread runs.
   for (Operation *function : timedFunctions(module))
-    jobs.push_back({function, manager.nest(function), Remarks(function, pass)});
+    jobs.push_back(
+        {function, manager.nest(function), Remarks(function, pass), success()});
+  // W7: something to do.
   if (jobs.empty())
     module.emitWarning() << pass
                          << " found no function with timed operations here";
-  LogicalResult result =
-      failableParallelForEach(module.getContext(), jobs, [&](Job &job) {
-        return body(job.function, job.manager, job.remarks);
-      });
+  // Every function is looked at, whatever happens to the others: which errors a
+  // user sees must not depend on threads.
+  parallelForEach(module.getContext(), jobs, [&](Job &job) {
+    job.result = body(job.function, job.manager, job.remarks);
+  });
   for (Job &job : jobs)
     job.remarks.flush();
-  return result;
+  return failure(
+      llvm::any_of(jobs, [](const Job &job) { return failed(job.result); }));
 }

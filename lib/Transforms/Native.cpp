@@ -7,6 +7,7 @@
 //===----------------------------------------------------------------------===//
 
 #include "lull/Analysis/Devices.h"
+#include "lull/Analysis/ProgramReader.h"
 #include "lull/IR/QubitSites.h"
 #include "lull/Transforms/Functions.h"
 #include "lull/Transforms/Passes.h"
@@ -40,7 +41,7 @@ public:
 private:
   LogicalResult play(TimedOpInterface pulse, SiteId site);
   /// Closes the frames of an operation's sites before it.
-  void closeBefore(TimedOpInterface op, ArrayRef<SiteId> on);
+  LogicalResult closeBefore(TimedOpInterface op, ArrayRef<SiteId> on);
 
   Operation *function;
   const Device &device;
@@ -57,34 +58,52 @@ LogicalResult NativeWriter::play(TimedOpInterface pulse, SiteId site) {
       writer.resolve(site, pulse.getPulsePhase().multiple().modulo(2));
   if (!native)
     return pulse->emitError(llvm::toString(native.takeError()));
-  if (pulse.getDuration() != Duration::ticks((*native)->width))
+  // W15: as long as the device plays it.
+  llvm::Expected<Ticks> length = device.clock().toTicks(pulse.getDuration());
+  if (!length)
+    return pulse->emitError(llvm::toString(length.takeError()));
+  if (*length != (*native)->width)
     return pulse->emitError("lasts ")
-           << pulse.getDuration().str() << " when '" << (*native)->entry->name
+           << *length << " dt when '" << (*native)->entry->name
            << "' plays it in " << (*native)->width << " dt on site " << site;
   operands.clear();
   pulse.collectQubits(operands);
   builder.setInsertionPoint(pulse);
   Value qubit = writer.play(pulse->getLoc(), operands.front()->get(), site,
                             **native, pulse.isLastPulse());
-  if (Value carrier = pulse.getCarrier(0))
+  if (!qubit)
+    return failure();
+  if (Value carrier = pulse.getCarrier(0)) {
     carrier.replaceAllUsesWith(qubit);
+    sites.carryOn(carrier, qubit);
+  }
   pulse->erase();
   return success();
 }
 
-void NativeWriter::closeBefore(TimedOpInterface op, ArrayRef<SiteId> on) {
+LogicalResult NativeWriter::closeBefore(TimedOpInterface op,
+                                        ArrayRef<SiteId> on) {
   operands.clear();
   op.collectQubits(operands);
   builder.setInsertionPoint(op);
-  for (auto [site, operand] : llvm::zip(on, operands))
-    operand->set(writer.close(op->getLoc(), operand->get(), site));
+  for (auto [site, operand] : llvm::zip(on, operands)) {
+    Value qubit = writer.close(op->getLoc(), operand->get(), site);
+    if (!qubit)
+      return failure();
+    operand->set(qubit);
+  }
+  return success();
 }
 
 LogicalResult NativeWriter::run() {
   SmallVector<SiteId, 4> on;
-  Block &block = function->getRegion(0).front();
-  for (Operation &op : llvm::make_early_inc_range(block)) {
+  FailureOr<Block *> body = ProgramReader(function, device).body();
+  if (failed(body))
+    return failure();
+  for (Operation &op : llvm::make_early_inc_range(**body)) {
     auto timed = dyn_cast<TimedOpInterface>(op);
+    if (!timed && failed(ProgramReader::requireUntimed(&op)))
+      return failure();
     if (!timed)
       continue;
     OperationKind kind = timed.getOperationKind();
@@ -93,18 +112,19 @@ LogicalResult NativeWriter::run() {
     if (kind != OperationKind::Pulse && !writer.anyOpen() &&
         op.getNumResults() == 0)
       continue;
-    if (failed(sites.read(timed, device, on)))
+    if (failed(sites.read(timed, device, on)) ||
+        failed(ProgramReader::requireOneQubit(timed, on.size())))
       return failure();
     if (kind == OperationKind::Pulse) {
       if (failed(play(timed, on.front())))
         return failure();
     } else if (kind != OperationKind::Delay && kind != OperationKind::Idle) {
       // A frame passes through a wait, but not through anything else.
-      if (writer.anyOpen())
-        closeBefore(timed, on);
+      if (writer.anyOpen() && failed(closeBefore(timed, on)))
+        return failure();
     }
   }
-  return success();
+  return writer.requireClosed();
 }
 
 void NativePass::runOnOperation() {

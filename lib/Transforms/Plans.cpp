@@ -26,6 +26,7 @@ llvm::Expected<Sequence> lull::buildSequence(SequenceOp op) {
     for (FractionAttr instant : instants->getAsRange<FractionAttr>())
       sequence.instants.push_back(Instant::at(instant.getValue()));
   } else {
+    // U8, W10: a formula, and not too many pulses for it.
     auto instantsOrError =
         instantsByFormula(*op.getFormula(), sequence.phases.size());
     if (!instantsOrError)
@@ -38,10 +39,12 @@ llvm::Expected<Sequence> lull::buildSequence(SequenceOp op) {
     return net.takeError();
   if (net->kind == Net::Kind::Identity)
     return sequence;
+  // U9: the identity.
   if (!op.getClosed())
     return fault("sequence {} multiplies to {} when it should be the identity "
                  "(a sequence with an odd number of pulses may be 'closed')",
                  sequence.name, net->str());
+  // U10: closed by one pulse.
   return close(sequence);
 }
 
@@ -86,9 +89,11 @@ llvm::Expected<const Sequence *> Plans::base(Attribute sequence) {
     return entry.get();
   };
   if (auto name = dyn_cast<StringAttr>(sequence))
+    // W8, W9, W10: a member of a family of the catalogue.
     return keep(findSequence(name.getValue()));
   auto symbol = cast<FlatSymbolRefAttr>(sequence);
   auto op = SymbolTable::lookupNearestSymbolFrom<SequenceOp>(scope, symbol);
+  // W11: a sequence.
   if (!op)
     return fault("unknown sequence @{}", symbol.getValue().str());
   return keep(buildSequence(op));
@@ -101,6 +106,7 @@ llvm::Expected<std::shared_ptr<const Sequence>> Plans::played(PlanAttr plan) {
   llvm::Expected<const Sequence *> once = base(plan.getSequence());
   if (!once)
     return once.takeError();
+  // W10: not too many pulses.
   llvm::Expected<Sequence> repeated =
       repeat(**once, plan.getRepeats(), plan.getAlternating());
   if (!repeated)
@@ -115,6 +121,7 @@ llvm::Expected<Ticks> Plans::width(SiteId site, Fraction phase) {
   auto key = std::pair(site, std::pair(phase.numerator(), phase.denominator()));
   if (auto known = widths.find(key); known != widths.end())
     return known->second;
+  // W12, W16: a pulse that the device has.
   llvm::Expected<NativePulse> pulse = nativePulse(device, site, phase);
   if (!pulse)
     return pulse.takeError();

@@ -1,5 +1,4 @@
-//===- PulseWriter.cpp - Pulses written as the device's operations --*- C++
-//-*-===//
+//===- PulseWriter.cpp - Pulses as operations -------------------*- C++ -*-===//
 //
 // Part of the Lull project, under the Apache License v2.0 with LLVM Exceptions.
 // See LICENSE for license information.
@@ -45,6 +44,7 @@ Value PulseWriter::changeFrame(Location loc, Value qubit, OpenFrame &open,
   openFrames += int(!target.isZero()) - int(!open.frame.isZero());
   open.frame = target;
   open.entry = entry;
+  open.changed = loc;
   if (change.isZero())
     return qubit;
   return hostOf(qubit.getType())
@@ -59,6 +59,26 @@ Value PulseWriter::close(Location loc, Value qubit, SiteId site) {
   return changeFrame(loc, qubit, open->second, 0, open->second.entry);
 }
 
+LogicalResult PulseWriter::requireClosed() const {
+  if (!anyOpen())
+    return success();
+  std::vector<SiteId> open;
+  for (const auto &[site, frame] : frames)
+    if (!frame.frame.isZero())
+      open.push_back(site);
+  llvm::sort(open);
+  // W26: the program's frame is its own again where the window ends.
+  for (SiteId site : open) {
+    const OpenFrame &frame = frames.find(site)->second;
+    emitError(*frame.changed)
+        << "leaves the frame of site " << site << " off by "
+        << frame.frame.str()
+        << " pi at the end of the program: the last pulse of a window says "
+           "'last'";
+  }
+  return failure();
+}
+
 Value PulseWriter::play(Location loc, Value qubit, SiteId site,
                         const NativePulse &pulse, bool last) {
   const HostInterface *host = hostOf(qubit.getType());
@@ -67,17 +87,19 @@ Value PulseWriter::play(Location loc, Value qubit, SiteId site,
   Fraction behind = Fraction(0).minus(pulse.frame)->modulo(2);
   const OperationEntry *frameEntry =
       pulse.frameEntry ? pulse.frameEntry : open.entry;
-  qubit = changeFrame(loc, qubit, open, behind, frameEntry);
   SmallVector<Angle, 2> angles;
   for (Fraction parameter : pulse.parameters)
     angles.push_back(Angle::ofPi(parameter));
   Duration length = Duration::ticks(pulse.entry->duration);
   StringAttr name = nameOf(pulse.entry);
-  qubit = host->buildGate(builder, loc, name, angles, qubit, length);
-  if (pulse.count == 2) {
-    if (Ticks pause = pulse.second - pulse.entry->duration)
+  qubit = changeFrame(loc, qubit, open, behind, frameEntry);
+  // Null where the host could not build what was asked for, and said so.
+  for (unsigned turn = 0; qubit && turn < pulse.count; ++turn) {
+    Ticks pause = turn ? pulse.second - pulse.entry->duration : 0;
+    if (pause)
       qubit = host->buildDelay(builder, loc, qubit, Duration::ticks(pause));
-    qubit = host->buildGate(builder, loc, name, angles, qubit, length);
+    if (qubit)
+      qubit = host->buildGate(builder, loc, name, angles, qubit, length);
   }
-  return last ? changeFrame(loc, qubit, open, 0, frameEntry) : qubit;
+  return qubit && last ? changeFrame(loc, qubit, open, 0, frameEntry) : qubit;
 }

@@ -45,6 +45,8 @@ public:
         protectName(builder.getStringAttr(LullDialect::protectAttrName)) {}
 
   void write(const Gap &gap);
+  /// Whether a host could not build an idle and said so.
+  bool anyFailed() const { return failed; }
 
 private:
   void writeBefore(TimedOpInterface after, const Gap &gap);
@@ -67,6 +69,7 @@ private:
   OpId current = NoOp;
   SmallVector<OpOperand *, 4> operands;
   size_t index = 0;
+  bool failed = false;
 };
 
 } // namespace
@@ -84,8 +87,12 @@ void GapWriter::writeBefore(TimedOpInterface after, const Gap &gap) {
   WindowState state = states.before(gap.after, index);
   remark(after->getLoc(), gap, state);
   builder.setInsertionPoint(after);
-  operands[index]->set(
-      buildIdle(after->getLoc(), operands[index]->get(), gap, state));
+  Value next = buildIdle(after->getLoc(), operands[index]->get(), gap, state);
+  if (!next) {
+    failed = true;
+    return;
+  }
+  operands[index]->set(next);
   // The wish for the waits that end here goes along with them.
   if (Attribute wish = after->getDiscardableAttr(protectName))
     after->getPrevNode()->setDiscardableAttr(protectName, wish);
@@ -101,10 +108,16 @@ void GapWriter::writeAtEnd(const Gap &gap) {
     builder.setInsertionPoint(block.getTerminator());
   else
     builder.setInsertionPointToEnd(&block);
-  Value next = buildIdle(loc, qubit, gap, state);
   // In value semantics, whatever returns the qubit returns the later one.
-  if (next != qubit)
-    qubit.replaceAllUsesExcept(next, next.getDefiningOp());
+  SmallVector<OpOperand *> uses;
+  if (hostOf(qubit.getType())->hasValueSemantics())
+    for (OpOperand &use : qubit.getUses())
+      uses.push_back(&use);
+  Value next = buildIdle(loc, qubit, gap, state);
+  failed |= !next;
+  for (OpOperand *use : uses)
+    if (next)
+      use->set(next);
 }
 
 void GapWriter::remark(Location loc, const Gap &gap, WindowState state) {
@@ -150,6 +163,8 @@ LogicalResult SchedulePass::makeTight(const Timeline &timeline,
     writer.write(gap);
     ++gaps;
   });
+  if (writer.anyFailed())
+    return failure();
   if (remarks.wanted())
     remarks.analysis(
         program.function()->getLoc(), "Length",

@@ -59,6 +59,7 @@ LogicalResult SetDurationsPass::setAll(Operation *function,
       place->second = device.named(name);
     const OperationEntry *entry =
         place->second ? device.find(place->second, on) : nullptr;
+    // W6: an entry.
     if (!entry) {
       anyFailed = true;
       op->emitError(llvm::toString(device.require(name, on).takeError()));

@@ -7,7 +7,7 @@
 //===----------------------------------------------------------------------===//
 
 #include "lull/Analysis/Devices.h"
-#include "lull/IR/Ops.h"
+#include "lull/IR/DeviceBuilder.h"
 #include "lull/Transforms/DemoDevices.h"
 #include "lull/Transforms/Passes.h"
 
@@ -44,6 +44,7 @@ private:
 } // namespace
 
 LogicalResult UseDevicePass::initialize(MLIRContext *context) {
+  // W17: one of the two.
   if (file.empty() && name.empty())
     return emitError(UnknownLoc::get(context))
            << "lull-use-device needs a file or the name of a device";
@@ -60,8 +61,15 @@ FailureOr<OwningOpRef<ModuleOp>> UseDevicePass::parse(llvm::SourceMgr &source) {
   if (!parsed)
     return failure();
   SmallVector<DeviceOp> found(parsed->getOps<DeviceOp>());
-  if (found.size() == 1)
+  // W19: one device.
+  if (found.size() == 1) {
+    // W27: and nothing else, which would be dropped in silence.
+    for (Operation &op : *parsed->getBody())
+      if (!isa<DeviceOp>(op))
+        return op.emitError("has no place in a device file, which holds one "
+                            "lull.device");
     return parsed;
+  }
   InFlightDiagnostic diag = parsed->emitError("holds ")
                             << found.size()
                             << " devices when it should hold one";
@@ -72,6 +80,7 @@ FailureOr<OwningOpRef<ModuleOp>> UseDevicePass::parse(llvm::SourceMgr &source) {
 
 FailureOr<OwningOpRef<ModuleOp>> UseDevicePass::read() {
   auto buffer = llvm::MemoryBuffer::getFileOrSTDIN(file);
+  // W18: a file.
   if (!buffer)
     return getOperation().emitError("cannot open the device file '")
            << file << "': " << buffer.getError().message();
@@ -87,6 +96,7 @@ FailureOr<DeviceOp> UseDevicePass::link(DeviceOp device) {
     OpBuilder builder(module.getBodyRegion());
     return cast<DeviceOp>(builder.clone(*device));
   }
+  // W21: the same device.
   if (OperationEquivalence::isEquivalentTo(
           there, device, OperationEquivalence::IgnoreLocations))
     return cast<DeviceOp>(there);
@@ -113,6 +123,7 @@ FailureOr<DeviceOp> UseDevicePass::findByName() {
       return failure();
     return link(*(*parsed)->getOps<DeviceOp>().begin());
   }
+  // W20: a device.
   InFlightDiagnostic diag = module.emitError("unknown device '")
                             << name << "': built in are ";
   llvm::interleaveComma(demoDevices(), diag,
@@ -134,10 +145,8 @@ void UseDevicePass::runOnOperation() {
   auto symbol = FlatSymbolRefAttr::get(device->getSymNameAttr());
   for (Operation *function : timedFunctions(getOperation())) {
     // One that runs on another device says so, itself or by its module.
-    bool named = false;
-    for (Operation *at = function; at; at = at->getParentOp())
-      named |= at->hasAttr(LullDialect::deviceAttrName);
-    if (!named)
+    FlatSymbolRefAttr named;
+    if (!deviceHolder(function, named))
       function->setAttr(LullDialect::deviceAttrName, symbol);
   }
 }

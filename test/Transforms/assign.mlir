@@ -66,3 +66,16 @@ func.func @windows() attributes {lull.device = @line} {
   lull.idle %q0 for 2000 dt live plan "udd-4"
   return
 }
+
+// A spacing that asks for more than any sequence has leaves the window; one
+// beyond 64 bits when multiplied asks for one repeat.
+// RUN: lull-opt %s --lull-assign="sequence=cpmg-64 spacing='288230376151711744 dt'" | FileCheck %s --check-prefix=FAR
+// RUN: lull-opt %s --lull-assign="sequence=cpmg-1 spacing='1 dt'" --remarks-filter=lull-assign 2>&1 | FileCheck %s --check-prefix=CLOSE
+// FAR-LABEL: @long
+// FAR: lull.idle %q0 for 17179869184 dt live plan "cpmg-64"{{$}}
+// CLOSE: Left {{.*}}left: a spacing of 1 dt (1 ns) asks for 17179869184 repeats of cpmg-1, more than 10000 pulses
+func.func @long() attributes {lull.device = @line} {
+  %q0 = lull.qubit 0
+  lull.idle %q0 for 17179869184 dt live
+  return
+}

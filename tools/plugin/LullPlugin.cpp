@@ -32,11 +32,25 @@ struct Host {
   bool hasOurs = false;
 };
 
+/// Whether an object of the process is the one that holds this code. Its name
+/// does not tell: a plugin may be loaded by any.
+bool isThisPlugin(const dl_phdr_info &info) {
+  auto here = reinterpret_cast<ElfW(Addr)>(&isThisPlugin);
+  for (int i = 0; i < info.dlpi_phnum; ++i) {
+    const ElfW(Phdr) &segment = info.dlpi_phdr[i];
+    ElfW(Addr) begin = info.dlpi_addr + segment.p_vaddr;
+    if (segment.p_type == PT_LOAD && here >= begin &&
+        here - begin < segment.p_memsz)
+      return true;
+  }
+  return false;
+}
+
 int visitObject(dl_phdr_info *info, size_t, void *data) {
   Host &host = *static_cast<Host *>(data);
   const char *slash = std::strrchr(info->dlpi_name, '/');
   const char *name = slash ? slash + 1 : info->dlpi_name;
-  if (std::strstr(name, "LullPlugin"))
+  if (isThisPlugin(*info))
     host.pastPlugin = true;
   else if (!host.pastPlugin &&
            std::strcmp(name, "libMLIR.so." LULL_MLIR_SOVERSION) == 0)

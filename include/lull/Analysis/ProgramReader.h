@@ -1,5 +1,4 @@
-//===- ProgramReader.h - A function's operations, one by one, with times --*-
-//C++ -*-===//
+//===- ProgramReader.h - Operations with their times ------------*- C++ -*-===//
 //
 // Part of the Lull project, under the Apache License v2.0 with LLVM Exceptions.
 // See LICENSE for license information.
@@ -15,6 +14,7 @@
 #include "lull/Timing/Problem.h"
 
 #include "mlir/Support/LLVM.h"
+#include "llvm/ADT/DenseSet.h"
 
 #include <vector>
 
@@ -35,6 +35,12 @@ public:
 
   /// The one block of the function; fails if there are more.
   mlir::FailureOr<mlir::Block *> body();
+
+  /// Fails if there is a timed operation in a region of `op`.
+  static llvm::LogicalResult requireUntimed(mlir::Operation *op);
+
+  /// Fails if an idle or a pulse is on another number of qubits than one.
+  static llvm::LogicalResult requireOneQubit(TimedOpInterface op, size_t count);
 
   /// Reads the next operation in program order. True if it is a timed one, and
   /// then the step below is about it; false if it concerns no qubit.
@@ -60,13 +66,16 @@ public:
   /// When the qubit is free.
   Ticks clock(ResourceId qubit) const { return clocks[qubit]; }
 
-  /// Says that `value` stands for the qubit from here on, since the caller has
-  /// replaced the operation that was read last.
-  void carryOn(ResourceId qubit, mlir::Value value);
+  /// Says that `to` stands for the qubit from here on and `from` no longer
+  /// does, since the caller has replaced the operation that was read last.
+  void carryOn(ResourceId qubit, mlir::Value from, mlir::Value to);
 
 private:
   llvm::LogicalResult readTimed(TimedOpInterface op);
   llvm::LogicalResult readOther(mlir::Operation *op);
+  /// Notes classical values that depend on what timed operations give, and
+  /// fails if a timed operation takes one.
+  llvm::LogicalResult followOutcomes(mlir::Operation *op);
   mlir::FailureOr<Ticks> durationOf(TimedOpInterface op);
   mlir::FailureOr<ResourceId> qubitOf(mlir::Value value, mlir::Operation *user);
 
@@ -78,6 +87,7 @@ private:
   std::vector<Ticks> clocks;
   llvm::DenseMap<mlir::Value, ResourceId> byValue;
   llvm::DenseMap<SiteId, ResourceId> bySite;
+  llvm::DenseSet<mlir::Value> outcomes;
   /// The last type looked at and whether it is a qubit: types come in runs.
   mlir::Type lastType;
   bool lastIsQubit = false;

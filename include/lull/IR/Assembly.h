@@ -30,6 +30,9 @@ using mlir::Operation;
 using mlir::ParseResult;
 using mlir::Type;
 
+/// Whether MLIR's lexer reads `text` as one bare identifier.
+bool isBareWord(llvm::StringRef text);
+
 // Shared by attributes and operations.
 ParseResult parseDuration(AsmParser &parser, Duration &value);
 /// A whole number, `a/b`; no decimals.

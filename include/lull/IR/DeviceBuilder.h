@@ -19,11 +19,11 @@ namespace lull {
 /// emitted if `quiet`).
 mlir::FailureOr<Device> buildDevice(DeviceOp op, bool quiet = false);
 
-/// The device that an operation (a function, say) runs on, by the attribute
-/// `lull.device` of it or of the nearest ancestor that has one. Null if there
-/// is no such attribute, or its symbol is no device (an error is emitted in the
-/// latter case).
-DeviceOp lookupDevice(mlir::Operation *op);
+/// The operation whose attribute `lull.device` says what `op` (a function,
+/// say) runs on: itself or its nearest ancestor that has one; and the symbol,
+/// which is to be looked up from there. Null if there is none.
+mlir::Operation *deviceHolder(mlir::Operation *op,
+                              mlir::FlatSymbolRefAttr &symbol);
 
 /// Whether a device can run what a function says: sites exist, pairs are
 /// coupled, durations are on the clock. Emits an error at each operation that

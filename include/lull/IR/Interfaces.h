@@ -37,7 +37,10 @@ namespace lull {
 /// How Lull reads and writes a dialect's qubits. Builders return the value to
 /// be used for the qubit from there on: the same one in reference semantics,
 /// the new result in value semantics; null after having emitted an error if the
-/// dialect cannot say it.
+/// dialect cannot say it, and the pass fails. They may build several operations
+/// (constants, say), of dialects that are loaded: `dependentDialects` of the
+/// host's own dialect sees to that. They are called for different functions
+/// from several threads at once.
 class HostInterface : public mlir::DialectInterface::Base<HostInterface> {
 public:
   HostInterface(mlir::Dialect *dialect) : Base(dialect) {}
@@ -61,13 +64,16 @@ public:
   virtual mlir::Value buildDelay(mlir::OpBuilder &builder, mlir::Location loc,
                                  mlir::Value qubit, Duration duration) const;
 
-  /// A window. Default: `lull.idle` on the host's qubit.
+  /// A window, by the operation that is built last. A host with an idle of its
+  /// own writes the state where its getWindowState reads it. Default:
+  /// `lull.idle` on the host's qubit.
   virtual mlir::Value buildIdle(mlir::OpBuilder &builder, mlir::Location loc,
                                 mlir::Value qubit, Duration duration,
                                 WindowState state) const;
 
   /// Whether the dialect's operations carry qubits on as results. Decides what
-  /// the default builders make.
+  /// the default builders and `lull.pulse` give, and whether what returns a
+  /// qubit must return the one behind its last wait.
   virtual bool hasValueSemantics() const { return false; }
 };
 

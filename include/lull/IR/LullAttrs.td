@@ -33,6 +33,7 @@ def Lull_WindowStateAttr
     dephasing cannot harm it and pulses would. `live`: a state that matters.
     `spent`: never used again except to be measured or reset.
   }];
+  let assemblyFormat = "`<` $value `>`";
 }
 
 def Lull_PlanAttr : AttrDef<Lull_Dialect, "Plan"> {
@@ -49,6 +50,10 @@ def Lull_PlanAttr : AttrDef<Lull_Dialect, "Plan"> {
                         "bool":$alternating);
   let hasCustomAssemblyFormat = 1;
   let genVerifyDecl = 1;
+  let extraClassDeclaration = [{
+    /// The most repeats that a plan may have.
+    static constexpr unsigned mostRepeats = 10000;
+  }];
 }
 
 //===----------------------------------------------------------------------===//
@@ -76,7 +81,7 @@ def Lull_FractionAttr : AttrDef<Lull_Dialect, "Fraction"> {
 
 def Lull_ClockAttr : AttrDef<Lull_Dialect, "Clock"> {
   let mnemonic = "clock";
-  let summary = "dt as an exact fraction of a unit of seconds";
+  let summary = "the length of dt, an exact fraction of a unit of seconds";
   let description = "Example: `#lull.clock<2/9 ns>`.";
   let parameters = (ins "::lull::Fraction":$dt, "::lull::TimeUnit":$unit);
   let hasCustomAssemblyFormat = 1;

@@ -104,6 +104,10 @@ def Lull_OperationOp : Lull_DeviceLine<"operation"> {
     (`echo` custom<Share>($echo)^)? attr-dict
   }];
   let hasVerifier = 1;
+  let extraClassDeclaration = [{
+    /// The most qubits that an operation of a device may be for.
+    static constexpr int64_t mostQubits = 1000;
+  }];
 }
 
 def Lull_SequenceOp : Op<Lull_Dialect, "sequence", [Symbol]> {

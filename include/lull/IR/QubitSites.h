@@ -39,6 +39,17 @@ public:
   llvm::LogicalResult read(TimedOpInterface op, const Device &device,
                            llvm::SmallVectorImpl<SiteId> &sites);
 
+  /// Says that `to` stands for what `from` stood for, since the caller has
+  /// replaced an operation that was read.
+  void carryOn(mlir::Value from, mlir::Value to) {
+    auto place = known.find(from);
+    if (from == to || place == known.end())
+      return;
+    std::optional<SiteId> site = place->second;
+    known.erase(place);
+    known[to] = site;
+  }
+
 private:
   mlir::Operation *function;
   llvm::DenseMap<mlir::Value, std::optional<SiteId>> known;

@@ -8,13 +8,20 @@
 //
 // Where the pulses of a sequence really go. Starts lie on absolute multiples of
 // the device's step, pulses do not overlap and keep the least gap, all lie in
-// the window. Among these placements the chosen one has the smallest
-// |residual|, then the smallest sum of squared displacements of the pulse
-// centres from their ideal places, then mirror symmetry, then the earliest
-// pulses (the lexicographically smallest starts). The search is exact
-// (docs/Rationale.md says how), not a heuristic. Only instants without a small
-// common denominator are rounded first: their distance from the middle of the
-// window to the nearest 2^-20 tick, or to 2^-53 of a window beyond 2^33 ticks.
+// the window. Among these placements the chosen one has the residual nearest to
+// the sequence's own imbalance, then the smallest sum of squared displacements
+// of the pulse centres from their ideal places, then mirror symmetry, then the
+// earliest pulses (the lexicographically smallest starts).
+//
+// The imbalance is the residual of pulses without width at the instants x_k of
+// a window of T: T ((-1)^n - sum over k of (-1)^k 2 x_k). It is zero for almost
+// all sequences of the catalogue, but T/3 for pdd-2.
+//
+// The search is exact (docs/Rationale.md says how), not a heuristic. Only
+// instants without a small common denominator are rounded first: their distance
+// from the middle of the window to the nearest 2^-20 tick, or to 2^-53 of a
+// window beyond 2^33 ticks. Then an imbalance of at most 2n such parts of a
+// tick counts as none.
 //
 //===----------------------------------------------------------------------===//
 
@@ -44,7 +51,8 @@ struct Placement {
   std::vector<Ticks> starts;
   /// The integral of the switching function over the window, with flips at the
   /// pulse centres: sum of + and - intervals, in ticks. Zero: static detuning
-  /// is refocused exactly.
+  /// is refocused exactly. The plain integral: the imbalance of the sequence is
+  /// part of it.
   Ticks residual = 0;
   /// Sum of squared displacements of the pulse centres, in ticks^2.
   double displacement = 0;

@@ -19,6 +19,8 @@
 
 #include <fmt/format.h>
 
+#include <cstdint>
+#include <string>
 #include <utility>
 
 namespace lull {
@@ -30,6 +32,11 @@ llvm::Error fault(fmt::format_string<Args...> format, Args &&...args) {
   return llvm::createStringError(
       llvm::inconvertibleErrorCode(),
       fmt::format(format, std::forward<Args>(args)...));
+}
+
+/// `1 site`, `2 sites`.
+inline std::string counted(std::uint64_t count, llvm::StringRef noun) {
+  return fmt::format("{} {}{}", count, noun.str(), count == 1 ? "" : "s");
 }
 
 } // namespace lull

@@ -110,8 +110,9 @@ def LullEmit : Lull_Pass<"lull-emit"> {
   let description = [{
     Replaces each idle that has a plan by pulses (`lull.pulse`) on the device's
     start grid and delays between them that add up to the window exactly. Among
-    the placements on the grid it takes the one of least residual, then of least
-    displacement (docs/Spec.md). A plan that does not fit its window is an
+    the placements on the grid it takes the one whose residual is nearest to the
+    sequence's own (zero for a balanced one), then of least displacement
+    (docs/Spec.md). A plan that does not fit its window is an
     error. A remark per window gives the sequence, pulses and residual.
 
     With `native` the pulses are written in the device's operations at once, as

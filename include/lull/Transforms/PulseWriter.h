@@ -1,5 +1,4 @@
-//===- PulseWriter.h - Pulses written as the device's operations --*- C++
-//-*-===//
+//===- PulseWriter.h - Pulses as operations ---------------------*- C++ -*-===//
 //
 // Part of the Lull project, under the Apache License v2.0 with LLVM Exceptions.
 // See LICENSE for license information.
@@ -32,13 +31,18 @@ public:
   llvm::Expected<const NativePulse *> resolve(SiteId site, Fraction phase);
 
   /// Writes one pulse on a qubit at the builder's place; returns the qubit from
-  /// there on. `last` closes the frame.
+  /// there on, or null if the host could not build it and said so. `last`
+  /// closes the frame.
   mlir::Value play(mlir::Location loc, mlir::Value qubit, SiteId site,
                    const NativePulse &pulse, bool last);
 
   /// Whether any site's frame stands off the program's.
   bool anyOpen() const { return openFrames != 0; }
-  /// Closes the frame of a site, if it is open, at the builder's place.
+  /// Emits an error at the pulse that left a frame open, for each that is open
+  /// at the end of the program; fails if there is one.
+  llvm::LogicalResult requireClosed() const;
+  /// Closes the frame of a site, if it is open, at the builder's place; null as
+  /// above.
   mlir::Value close(mlir::Location loc, mlir::Value qubit, SiteId site);
 
 private:
@@ -47,6 +51,8 @@ private:
     /// What has been added, in units of pi, in [0, 2).
     Fraction frame = 0;
     const OperationEntry *entry = nullptr;
+    /// The last place where it was changed.
+    std::optional<mlir::Location> changed;
   };
 
   /// Changes the frame so that it is `target` off the program's.

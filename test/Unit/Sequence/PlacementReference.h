@@ -57,15 +57,16 @@ inline std::vector<Instant> uhrig(int count) {
   return instants;
 }
 
-/// Ideal starts in units of 1 / scale tick.
+/// Ideal starts and the imbalance of the sequence in units of 1 / scale tick.
 struct Ideals {
   std::int64_t scale = 1;
   std::vector<std::int64_t> starts;
+  Wide own = 0;
 };
 
 /// All instants exact: a scale that makes them whole. Otherwise what the header
 /// promises: nearest 2^-20 tick as seen from the middle of the window, with
-/// mirror images rounded to mirror images.
+/// mirror images rounded to mirror images, and no imbalance below 2n of these.
 inline Ideals idealStarts(const Sequence &sequence,
                           const std::vector<Ticks> &widths, Ticks length) {
   Ideals ideals;
@@ -78,6 +79,10 @@ inline Ideals idealStarts(const Sequence &sequence,
       scale = std::lcm(scale, 2 * instant.exact->denominator());
   }
   ideals.scale = exact ? scale : std::int64_t(2) << 20;
+  // Interval by interval, as the definition says; once more in floating point.
+  Wide last = 0;
+  double plainOwn = 0, plainLast = 0;
+  int sign = 1;
   for (size_t i = 0; i != count; ++i) {
     const Instant &instant = sequence.instants[i];
     std::int64_t place;
@@ -99,8 +104,28 @@ inline Ideals idealStarts(const Sequence &sequence,
     ideals.starts.push_back(place -
                             widths[i] * ideals.scale /
                                 (sequence.anchor == Anchor::End ? 1 : 2));
+    ideals.own += sign * (place - last);
+    plainOwn += sign * (instant.value - plainLast);
+    last = place;
+    plainLast = instant.value;
+    sign = -sign;
   }
+  ideals.own += sign * (Wide(length) * ideals.scale - last);
+  plainOwn += sign * (1 - plainLast);
+  // In parts of 2^-20 tick.
+  double parts = double(ideals.own) / double(ideals.scale) * 1048576;
+  double rounding = exact ? 0 : double(count);
+  EXPECT_NEAR(parts, plainOwn * double(length) * 1048576,
+              rounding + 1e-9 * double(length) * 1048576);
+  if (!exact && std::abs(parts) <= 2 * double(count))
+    ideals.own = 0;
   return ideals;
+}
+
+/// How far a residual is from the imbalance of the sequence.
+inline Wide missOf(const Ideals &ideals, Ticks residual) {
+  Wide miss = Wide(residual) * ideals.scale - ideals.own;
+  return miss < 0 ? -miss : miss;
 }
 
 inline Wide costOf(const Ideals &ideals, const std::vector<Ticks> &starts) {
@@ -163,12 +188,13 @@ inline void checkPlacement(const Placement &placement, const Sequence &sequence,
 
 struct Optimum {
   bool exists = false;
-  Ticks residual = 0;
+  /// From the residual to the imbalance.
+  Wide miss = 0;
   Wide cost = 0;
   /// By Exhaustive only.
   bool mirror = false;
   std::vector<Ticks> starts;
-  /// The earliest with the same residual and cost, mirror symmetric or not.
+  /// The earliest with the same miss and cost, mirror symmetric or not.
   std::vector<Ticks> earliest;
 };
 
@@ -189,18 +215,16 @@ private:
   void place(Ticks from) {
     size_t index = starts.size();
     if (index == widths.size()) {
-      Ticks residual =
-          std::abs(residualByIntervals(starts, widths, window.length));
+      Wide miss =
+          missOf(ideals, residualByIntervals(starts, widths, window.length));
       bool mirror = isMirror(starts, widths, window.length);
-      auto key =
-          std::make_tuple(residual, costOf(ideals, starts), !mirror, starts);
-      if (!best.exists || std::make_pair(residual, std::get<1>(key)) <
-                              std::make_pair(best.residual, best.cost))
+      auto key = std::make_tuple(miss, costOf(ideals, starts), !mirror, starts);
+      if (!best.exists || std::make_pair(miss, std::get<1>(key)) <
+                              std::make_pair(best.miss, best.cost))
         best.earliest = starts; // The first of its kind, as they come in order.
-      if (!best.exists || key < std::make_tuple(best.residual, best.cost,
+      if (!best.exists || key < std::make_tuple(best.miss, best.cost,
                                                 !best.mirror, best.starts))
-        best = {true,   residual, std::get<1>(key),
-                mirror, starts,   best.earliest};
+        best = {true, miss, std::get<1>(key), mirror, starts, best.earliest};
       return;
     }
     for (Ticks start = from; start + widths[index] <= window.length; ++start) {
@@ -219,7 +243,7 @@ private:
   Optimum best;
 };
 
-/// The smallest |residual|, then the smallest cost, over all placements: the
+/// The smallest miss, then the smallest cost, over all placements: the
 /// least cost of the first k pulses with the k-th at or before a grid point,
 /// for every alternating sum of starts.
 inline Optimum byProgramming(const Sequence &sequence,
@@ -272,10 +296,10 @@ inline Optimum byProgramming(const Sequence &sequence,
       Wide cost = before[at(point, sum)];
       if (cost == None)
         continue;
-      Ticks residual = std::abs(fixed - 2 * window.step * sum);
-      if (!best.exists || residual < best.residual ||
-          (residual == best.residual && cost < best.cost))
-        best = {true, residual, cost, false, {}, {}};
+      Wide miss = missOf(ideals, fixed - 2 * window.step * sum);
+      if (!best.exists || miss < best.miss ||
+          (miss == best.miss && cost < best.cost))
+        best = {true, miss, cost, false, {}, {}};
     }
   return best;
 }
