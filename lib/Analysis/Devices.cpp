@@ -29,13 +29,22 @@ SmallVector<Operation *> lull::timedFunctions(Operation *root) {
 }
 
 Devices::Devices(Operation *module) {
-  SymbolTableCollection symbols;
+  // Many functions, few devices.
+  DenseMap<std::pair<Operation *, StringAttr>, DeviceOp> resolved;
+  auto resolve = [&](Operation *holder, FlatSymbolRefAttr symbol) {
+    Operation *scope = SymbolTable::getNearestSymbolTable(holder);
+    auto [place, isNew] = resolved.try_emplace({scope, symbol.getAttr()});
+    if (isNew)
+      place->second = resolveDevice(holder, symbol);
+    return place->second;
+  };
   for (Operation *function : timedFunctions(module)) {
     FlatSymbolRefAttr symbol;
     Operation *holder = deviceHolder(function, symbol);
     if (!holder)
       continue;
-    auto op = symbols.lookupNearestSymbolFrom<DeviceOp>(holder, symbol);
+    DeviceOp op = resolve(holder, symbol);
+    // A2: a device that there is.
     if (!op) {
       function->emitError("unknown device ") << symbol;
       reported.insert(function);

@@ -12,6 +12,8 @@
 #include "lull/IR/QubitSites.h"
 #include "lull/Timing/Fault.h"
 
+#include "mlir/Interfaces/CallInterfaces.h"
+
 using namespace lull;
 using namespace mlir;
 
@@ -38,7 +40,10 @@ FailureOr<ResourceId> ProgramReader::qubitOf(Value value, Operation *user) {
     sites.push_back(*site);
     values.push_back(value);
     clocks.push_back(0);
+    handedIn.push_back(false);
   }
+  if (isa<BlockArgument>(value))
+    handedIn[place->second] = true;
   return byValue[value] = place->second;
 }
 
@@ -121,11 +126,21 @@ LogicalResult ProgramReader::requireOneQubit(TimedOpInterface op,
 
 LogicalResult ProgramReader::followOutcomes(Operation *op) {
   bool timed = isa<TimedOpInterface>(op);
-  // Most operations take qubits only and give nothing.
-  bool depends =
-      !outcomes.empty() && llvm::any_of(op->getOperands(), [&](Value operand) {
-        return outcomes.contains(operand);
-      });
+  // Most operations take qubits only and give nothing. What is used inside of
+  // an operation counts as used by it.
+  auto takesOutcome = [&](Operation *at) {
+    return llvm::any_of(at->getOperands(), [&](Value operand) {
+      return outcomes.contains(operand);
+    });
+  };
+  bool depends = false;
+  if (!outcomes.empty())
+    depends = op->getNumRegions() == 0
+                  ? takesOutcome(op)
+                  : op->walk([&](Operation *inner) {
+                        return takesOutcome(inner) ? WalkResult::interrupt()
+                                                   : WalkResult::advance();
+                      }).wasInterrupted();
   // W28: an outcome is there when its operation ends, which the timing rule
   // does not know.
   if (timed && depends)
@@ -148,21 +163,56 @@ LogicalResult ProgramReader::requireUntimed(Operation *op) {
   if (op->getNumRegions() == 0)
     return success();
   Operation *inner = nullptr;
-  op->walk([&](TimedOpInterface timed) {
-    inner = timed;
+  op->walk([&](Operation *at) {
+    bool takesQubit = llvm::any_of(at->getOperandTypes(),
+                                   [](Type type) { return hostOf(type); });
+    if (!isa<TimedOpInterface>(at) && !takesQubit)
+      return WalkResult::advance();
+    inner = at;
     return WalkResult::interrupt();
   });
-  // W3: no time in regions.
+  // W3: no time and no qubits in regions.
   if (!inner)
     return success();
   InFlightDiagnostic diag =
-      op->emitError("timed operations in a region cannot be scheduled yet");
-  diag.attachNote(inner->getLoc()) << "a timed operation is here";
+      op->emitError("operations on qubits in a region cannot be scheduled yet");
+  diag.attachNote(inner->getLoc()) << "an operation on a qubit is here";
   return diag;
+}
+
+LogicalResult ProgramReader::requireUntimedCalls(Operation *op) {
+  SmallVector<Operation *> pending = {op};
+  while (!pending.empty()) {
+    Operation *timed = nullptr;
+    pending.pop_back_val()->walk([&](Operation *at) {
+      if (isa<TimedOpInterface>(at)) {
+        timed = at;
+        return WalkResult::interrupt();
+      }
+      if (auto call = dyn_cast<CallOpInterface>(at))
+        if (Operation *callee = call.resolveCallable();
+            callee && callees.insert(callee).second)
+          pending.push_back(callee);
+      return WalkResult::advance();
+    });
+    if (!timed)
+      continue;
+    // W30: how long it takes here, and on which qubits, is unknown.
+    callees.clear();
+    InFlightDiagnostic diag =
+        op->emitError("calls a function with timed operations, which cannot "
+                      "be scheduled yet");
+    diag.attachNote(timed->getLoc()) << "a timed operation is here";
+    return diag;
+  }
+  return success();
 }
 
 LogicalResult ProgramReader::readOther(Operation *op) {
   if (failed(requireUntimed(op)) || failed(followOutcomes(op)))
+    return failure();
+  if ((op->getNumRegions() || isa<CallOpInterface>(op)) &&
+      failed(requireUntimedCalls(op)))
     return failure();
   // What a terminator hands on is not acted on, but must be there to hand on.
   if (op->hasTrait<OpTrait::IsTerminator>())

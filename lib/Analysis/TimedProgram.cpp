@@ -39,6 +39,7 @@ FailureOr<TimedProgram> TimedProgram::read(Operation *function,
   }
   for (ResourceId qubit = 0; qubit < reader.numQubits(); ++qubit) {
     program.sites.push_back(reader.site(qubit));
+    program.handedIn.push_back(reader.isHandedIn(qubit));
     program.last.push_back(reader.value(qubit));
   }
   if (failed(report(program, program.input.check())))

@@ -26,34 +26,66 @@ BasisAction lull::basisAction(StringRef gate) {
       .Default(BasisAction::Unknown);
 }
 
-WindowStates::WindowStates(const TimedProgram &program, bool spentAtEnd)
+BasisAction lull::basisAction(const Action &plays) {
+  if (plays.kind == Action::Kind::Frame)
+    return BasisAction::Diagonal;
+  if (plays.kind == Action::Kind::Rotation && plays.turn == Fraction(1))
+    return BasisAction::Flip;
+  return BasisAction::Unknown;
+}
+
+BasisAction WindowStates::actionOf(OpId id) const {
+  StringAttr name = TimedOpInterface(program.op(id)).getListedName();
+  if (!name)
+    return BasisAction::Unknown;
+  // What the device says that it does goes before what its name suggests.
+  const Device &device = program.device();
+  ArrayRef<ResourceId> qubits = program.problem().occupied(id);
+  if (qubits.size() == 1)
+    if (const Device::NamedEntries *named = device.named(name))
+      if (const OperationEntry *entry =
+              device.find(named, program.site(qubits[0])))
+        if (entry->plays.kind != Action::Kind::None)
+          return basisAction(entry->plays);
+  return basisAction(name);
+}
+
+WindowStates::WindowStates(const TimedProgram &program, bool liveAtStart,
+                           bool spentAtEnd)
     : program(program) {
   const Problem &problem = program.problem();
   first.reserve(problem.size() + 1);
   actions.reserve(problem.size());
   std::uint32_t count = 0;
-  DenseMap<StringAttr, BasisAction> byName;
+  // One-qubit operations may differ by site.
+  DenseMap<std::pair<StringAttr, SiteId>, BasisAction> known;
   for (OpId id = 0; id < problem.size(); ++id) {
     first.push_back(count);
-    count += problem.occupied(id).size();
+    ArrayRef<ResourceId> qubits = problem.occupied(id);
+    count += qubits.size();
     BasisAction action = BasisAction::Unknown;
     if (problem.kind(id) == OperationKind::Gate) {
-      StringAttr name = TimedOpInterface(program.op(id)).getListedName();
-      auto [place, isNew] = byName.try_emplace(name, action);
-      if (isNew && name)
-        place->second = basisAction(name);
+      SiteId site = qubits.size() == 1 ? program.site(qubits[0]) : -1;
+      auto [place, isNew] = known.try_emplace(
+          {TimedOpInterface(program.op(id)).getListedName(), site});
+      if (isNew)
+        place->second = actionOf(id);
       action = place->second;
     }
     actions.push_back(action);
   }
   facts.resize(count);
-  forward();
+  forward(liveAtStart);
   backward(spentAtEnd);
 }
 
-void WindowStates::forward() {
+void WindowStates::forward(bool liveAtStart) {
   const Problem &problem = program.problem();
-  std::vector<bool> basis(problem.numResources(), true);
+  std::vector<bool> basis(problem.numResources(), !liveAtStart);
+  // A qubit that is handed in has a history that this function does not show.
+  for (ResourceId qubit = 0; qubit < problem.numResources(); ++qubit)
+    if (program.isHandedIn(qubit))
+      basis[qubit] = false;
   for (OpId id = 0; id < problem.size(); ++id) {
     ArrayRef<ResourceId> qubits = problem.occupied(id);
     for (auto [index, qubit] : llvm::enumerate(qubits))

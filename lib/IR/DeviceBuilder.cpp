@@ -220,3 +220,13 @@ Operation *lull::deviceHolder(Operation *op, FlatSymbolRefAttr &symbol) {
       return at;
   return nullptr;
 }
+
+DeviceOp lull::resolveDevice(Operation *holder, FlatSymbolRefAttr symbol) {
+  for (Operation *table = SymbolTable::getNearestSymbolTable(holder); table;
+       table = table->getParentOp()
+                   ? SymbolTable::getNearestSymbolTable(table->getParentOp())
+                   : nullptr)
+    if (Operation *found = SymbolTable::lookupSymbolIn(table, symbol.getAttr()))
+      return dyn_cast<DeviceOp>(found);
+  return {};
+}

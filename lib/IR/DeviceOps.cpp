@@ -11,6 +11,7 @@
 #include "lull/IR/Ops.h"
 
 #include "mlir/IR/DialectImplementation.h"
+#include "mlir/Interfaces/FunctionInterfaces.h"
 
 using namespace lull;
 using namespace mlir;
@@ -29,7 +30,23 @@ LogicalResult DeviceOp::verifyRegions() {
       return diag;
     }
   // Everything else is a rule of the plain device, which names what is wrong.
-  return success(succeeded(buildDevice(*this)));
+  FailureOr<Device> plain = buildDevice(*this);
+  if (failed(plain))
+    return failure();
+  // What runs on it is verified here, so that the device is converted once and
+  // not for every function.
+  bool sound = true;
+  if (Operation *scope = (*this)->getParentOp())
+    scope->walk<WalkOrder::PreOrder>([&](FunctionOpInterface function) {
+      FlatSymbolRefAttr symbol;
+      Operation *holder = deviceHolder(function, symbol);
+      if (holder && symbol.getAttr() == getSymNameAttr() &&
+          (SymbolTable::getNearestSymbolTable(holder) == scope ||
+           resolveDevice(holder, symbol) == *this))
+        sound &= succeeded(verifyAgainstDevice(function, *plain));
+      return WalkResult::skip();
+    });
+  return success(sound);
 }
 
 LogicalResult OperationOp::verify() {

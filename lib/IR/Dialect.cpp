@@ -96,39 +96,40 @@ void LullDialect::initialize() {
 // Attributes on other operations
 //===----------------------------------------------------------------------===//
 
-/// Checks `lull.device`, and the function against the device.
+/// Checks `lull.device`. Whether the symbol is there is for the passes to ask:
+/// a program may name a device that lull-use-device is yet to bring. What the
+/// program does on the device is checked once for all functions, with the
+/// device (DeviceOp::verifyRegions).
 static LogicalResult verifyDeviceUse(Operation *op, Attribute value) {
+  // A1: a symbol.
   auto symbol = dyn_cast<FlatSymbolRefAttr>(value);
-  // A1: a flat symbol.
   if (!symbol)
     return op->emitError("'lull.device' must be a symbol such as @barley but "
                          "is ")
            << value;
   Operation *found = SymbolTable::lookupNearestSymbolFrom(op, symbol);
-  // A2: of something.
-  if (!found)
-    return op->emitError("unknown device ") << symbol;
-  auto device = dyn_cast<DeviceOp>(found);
-  // A3: that is a device.
-  if (!device) {
-    InFlightDiagnostic diag = op->emitError() << symbol << " is not a device";
-    diag.attachNote(found->getLoc()) << "it is this operation";
-    return diag;
-  }
-  // A device that is wrong itself has its own errors.
-  FailureOr<Device> plain = buildDevice(device, /*quiet=*/true);
-  if (failed(plain))
+  // A3: of a device, if of anything.
+  if (!found || isa<DeviceOp>(found))
     return success();
-  if (isa<FunctionOpInterface>(op))
-    return verifyAgainstDevice(op, *plain);
-  // A module speaks for the functions in it that do not speak for themselves.
-  bool sound = true;
-  op->walk([&](FunctionOpInterface function) {
-    FlatSymbolRefAttr named;
-    if (deviceHolder(function, named) == op)
-      sound &= succeeded(verifyAgainstDevice(function, *plain));
-  });
-  return success(sound);
+  InFlightDiagnostic diag = op->emitError() << symbol << " is not a device";
+  diag.attachNote(found->getLoc()) << "it is this operation";
+  return diag;
+}
+
+/// A10: only what ends a wait, or the end of a function, can have a wish.
+static bool mayHaveWish(Operation *op) {
+  return isa<TimedOpInterface>(op) || op->hasTrait<OpTrait::IsTerminator>() ||
+         !op->isRegistered();
+}
+
+/// A11: of timed operations only a foreign idle keeps its state and plan so.
+static LogicalResult verifyForeignIdle(Operation *op, StringRef name) {
+  auto timed = dyn_cast<TimedOpInterface>(op);
+  if (!timed ||
+      (!isa<IdleOp>(op) && timed.getOperationKind() == OperationKind::Idle))
+    return success();
+  return op->emitError("'")
+         << name << "' has no effect here: it is for idles of other dialects";
 }
 
 LogicalResult LullDialect::verifyOperationAttribute(Operation *op,
@@ -142,13 +143,13 @@ LogicalResult LullDialect::verifyOperationAttribute(Operation *op,
     if (!isa<WindowStateAttr>(value))
       return op->emitError("'lull.state' must be a #lull.state but is ")
              << value;
-    return success();
+    return verifyForeignIdle(op, name);
   }
   if (name == planAttrName) {
     // A5: a plan.
     if (!isa<PlanAttr>(value))
       return op->emitError("'lull.plan' must be a #lull.plan but is ") << value;
-    return success();
+    return verifyForeignIdle(op, name);
   }
   if (name == protectAttrName) {
     // A6: a name, a symbol or a plan.
@@ -156,6 +157,9 @@ LogicalResult LullDialect::verifyOperationAttribute(Operation *op,
       return op->emitError("'lull.protect' must be the name of a sequence, its "
                            "symbol, a #lull.plan or \"none\" but is ")
              << value;
+    if (!mayHaveWish(op))
+      return op->emitError("'lull.protect' has no effect here: it is for timed "
+                           "operations and for the end of a function");
     return success();
   }
   // A7: nothing else.

@@ -29,10 +29,10 @@ struct Means {
 
 Means meansOn(const Device &device, SiteId site) {
   Means means;
-  for (const auto &owned : device.operations()) {
-    const OperationEntry *entry = owned.get();
-    // An entry for any site gives way to one of its name for this site.
-    if (device.find(device.named(entry->name), site) != entry)
+  for (const Device::NamedEntries *named : device.playing()) {
+    // The line for this site, or else the one for any.
+    const OperationEntry *entry = device.find(named, site);
+    if (!entry)
       continue;
     const Action &plays = entry->plays;
     bool isHalf = plays.turn == Fraction::of(1, 2);
@@ -102,14 +102,16 @@ llvm::Error cannotPlay(const Device &device, SiteId site, Fraction phase,
                has.empty() ? "" : " but ", lacks);
 }
 
-/// Two half turns, the second on the grid if the first is.
-llvm::Error setTwoHalves(NativePulse &pulse, Ticks step) {
-  Ticks half = pulse.entry->duration;
-  if (half > std::numeric_limits<Ticks>::max() / 2 - step)
+/// Two half turns, the second on the grid if the first is, and the least gap
+/// behind it: to the hardware they are two pulses.
+llvm::Error setTwoHalves(NativePulse &pulse, const Device &device) {
+  Ticks half = pulse.entry->duration, step = device.step(), next = 0;
+  if (__builtin_add_overflow(half, device.leastGap(), &next) ||
+      next > std::numeric_limits<Ticks>::max() / 2 - step)
     return fault("two half turns ('{}') of {} dt do not fit 64 bits",
                  pulse.entry->name, half);
   pulse.count = 2;
-  pulse.second = alignUp(half, step);
+  pulse.second = alignUp(next, step);
   pulse.width = pulse.second + half;
   return llvm::Error::success();
 }
@@ -157,12 +159,12 @@ llvm::Expected<NativePulse> lull::nativePulse(const Device &device, SiteId site,
     return pulse;
   }
   if (take(means.halves, /*samePhase=*/true)) {
-    if (llvm::Error error = setTwoHalves(pulse, device.step()))
+    if (llvm::Error error = setTwoHalves(pulse, device))
       return std::move(error);
     return pulse;
   }
   if (framed && take(means.halves, /*samePhase=*/false)) {
-    if (llvm::Error error = setTwoHalves(pulse, device.step()))
+    if (llvm::Error error = setTwoHalves(pulse, device))
       return std::move(error);
     if (llvm::Error error = setFrame())
       return std::move(error);

@@ -48,7 +48,7 @@ namespace {
 /// Window lengths times `scale` stay within this, so that squares of
 /// displacements, summed over all pulses, fit 128 bits.
 constexpr std::int64_t LongestScaled = std::int64_t(1) << 54;
-constexpr Ticks LongestWindow = LongestScaled / 2;
+static_assert(LongestWindow == LongestScaled / 2);
 constexpr size_t MostPlaced = size_t(1) << 18;
 
 /// One problem of placement in whole numbers.

@@ -282,6 +282,9 @@ llvm::Error Device::addOperation(OperationEntry entry) {
   }
   entries.push_back(std::make_unique<OperationEntry>(std::move(entry)));
   const OperationEntry *stored = entries.back().get();
+  if (stored->arity == 1 && stored->plays.kind != Action::Kind::None &&
+      !llvm::is_contained(playingNames, named))
+    playingNames.push_back(named);
   if (tuples.empty())
     named->any = stored;
   for (const SiteTuple &sites : tuples)

@@ -54,6 +54,8 @@ struct Window {
   SiteId site;
   Ticks start;
   Ticks length;
+  /// What the program wishes for it, on the idle or on what ends it; or null.
+  Attribute wish;
 };
 
 /// Decides the windows of one function.
@@ -72,9 +74,14 @@ private:
   /// Turns options into ticks of this device.
   LogicalResult prepare();
   LogicalResult decide(const Window &window);
+  /// Whether there is what a wish names, whether or not a wait ends there.
+  LogicalResult checkWish(Operation *op, Attribute wish);
   LogicalResult decideByWish(const Window &window, Attribute wish);
   /// Puts the plan on the window if it fits.
   LogicalResult tryPlan(const Window &window, PlanAttr plan);
+  /// How often the spacing lets a sequence be repeated; leaves the window and
+  /// fails if not once, or more often than can be.
+  FailureOr<unsigned> repeatsFor(const Window &window, const Sequence &base);
   /// A plan of `sequence` with the repeats that the options ask for; null if
   /// the window was left because they ask for too many.
   FailureOr<PlanAttr> makePlan(const Window &window, Attribute sequence);
@@ -133,6 +140,35 @@ void Decider::leave(const Window &window, const std::string &why) {
                   {"Length", std::to_string(window.length)}});
 }
 
+FailureOr<unsigned> Decider::repeatsFor(const Window &window,
+                                        const Sequence &base) {
+  // Pulses of so many repeats, with the one that closes an odd number.
+  auto pulses = [&](Ticks repeats) {
+    Ticks count = repeats * Ticks(base.size());
+    return count + count % 2;
+  };
+  // The most repeats whose pulses are `spacing` apart on average, so that
+  // length / pulses >= spacing.
+  Ticks most = window.length / spacing;
+  Ticks repeats = most / Ticks(base.size());
+  if (pulses(repeats) > most)
+    --repeats;
+  if (repeats <= 0) {
+    leave(window, fmt::format("one repeat of {} has its {} pulses less than {} "
+                              "apart on average",
+                              base.name, pulses(1), ticks(spacing)));
+    return failure();
+  }
+  if (repeats > Ticks(PlanAttr::mostRepeats) ||
+      pulses(repeats) > Ticks(MostPulses)) {
+    leave(window, fmt::format("a spacing of {} asks for {} repeats of {}, more "
+                              "than {} pulses",
+                              ticks(spacing), repeats, base.name, MostPulses));
+    return failure();
+  }
+  return unsigned(repeats);
+}
+
 FailureOr<PlanAttr> Decider::makePlan(const Window &window,
                                       Attribute sequence) {
   unsigned repeats = policy.repeats;
@@ -140,22 +176,10 @@ FailureOr<PlanAttr> Decider::makePlan(const Window &window,
     llvm::Expected<const Sequence *> base = plans.base(sequence);
     if (!base)
       return fail(window, base.takeError());
-    // The largest number of repeats whose pulses are `spacing` apart on
-    // average, so that length / (repeats * pulses) >= spacing.
-    Ticks apart = 0;
-    if (__builtin_mul_overflow(spacing, Ticks((*base)->size()), &apart))
-      apart = window.length;
-    Ticks wanted =
-        std::max<Ticks>(1, window.length / std::max<Ticks>(1, apart));
-    // More than any sequence may have: no repeats say that.
-    repeats = wanted > Ticks(PlanAttr::mostRepeats) ? 0 : unsigned(wanted);
-    if (repeats == 0 || repeats * (*base)->size() > MostPulses) {
-      leave(window,
-            fmt::format("a spacing of {} asks for {} repeats of {}, "
-                        "more than {} pulses",
-                        ticks(spacing), wanted, (*base)->name, MostPulses));
+    FailureOr<unsigned> asked = repeatsFor(window, **base);
+    if (failed(asked))
       return PlanAttr();
-    }
+    repeats = *asked;
   }
   return PlanAttr::get(function->getContext(), sequence, repeats,
                        policy.alternating);
@@ -165,6 +189,11 @@ LogicalResult Decider::tryPlan(const Window &window, PlanAttr plan) {
   llvm::Expected<Player *> player = plans.player(plan, window.site);
   if (!player)
     return fail(window, player.takeError());
+  if (window.length > LongestWindow) {
+    leave(window, fmt::format("pulses are placed in windows of at most {}",
+                              ticks(LongestWindow)));
+    return success();
+  }
   GridWindow grid = plans.window(window.start, window.length);
   Ticks needed = (*player)->least(grid);
   if (needed > window.length) {
@@ -194,8 +223,8 @@ LogicalResult Decider::decide(const Window &window) {
   TimedOpInterface op = window.op;
   if (op.getWindowPlan())
     return success();
-  if (Attribute wish = op->getDiscardableAttr(protectName))
-    return decideByWish(window, wish);
+  if (window.wish)
+    return decideByWish(window, window.wish);
   WindowState state = op.getWindowState();
   if (!policy.sequence) {
     leave(window, "no sequence was asked for");
@@ -219,22 +248,66 @@ LogicalResult Decider::decide(const Window &window) {
   return *plan ? tryPlan(window, *plan) : success();
 }
 
+LogicalResult Decider::checkWish(Operation *op, Attribute wish) {
+  if (auto name = dyn_cast<StringAttr>(wish)) {
+    if (name == "none")
+      return success();
+    if (name.getValue().starts_with("@"))
+      return op->emitError("the wish ")
+             << name << " is a name: the symbol of a sequence is written "
+             << "without quotes";
+  }
+  // W32: a sequence that there is.
+  auto plan = dyn_cast<PlanAttr>(wish);
+  llvm::Expected<const Sequence *> known =
+      plans.base(plan ? plan.getSequence() : wish);
+  return known ? success() : op->emitError(llvm::toString(known.takeError()));
+}
+
 LogicalResult Decider::run() {
   ProgramReader reader(function, device);
   FailureOr<Block *> body = reader.body();
   if (failed(body) || failed(prepare()))
     return failure();
+  std::vector<Window> windows;
+  // The window that each qubit has been in since its last operation, or none.
+  constexpr size_t none = ~size_t(0);
+  std::vector<size_t> waiting;
+  auto endWait = [&](ResourceId qubit, Attribute wish) {
+    if (size_t &window = waiting[qubit]; window != none) {
+      if (wish && !windows[window].wish)
+        windows[window].wish = wish;
+      window = none;
+    }
+  };
   for (Operation &op : **body) {
     FailureOr<bool> timed = reader.read(&op);
     if (failed(timed))
       return failure();
-    const ProgramReader::Step &step = reader.step();
-    if (!*timed || step.kind != OperationKind::Idle)
-      continue;
-    if (failed(decide({step.op, reader.site(step.qubits.front()), step.start,
-                       step.duration})))
+    waiting.resize(reader.numQubits(), none);
+    Attribute wish = op.getDiscardableAttr(protectName);
+    if (wish && failed(checkWish(&op, wish)))
       return failure();
+    // A wish on the terminator is for the waits that last to the end.
+    if (op.hasTrait<OpTrait::IsTerminator>())
+      for (ResourceId qubit = 0; qubit < reader.numQubits(); ++qubit)
+        endWait(qubit, wish);
+    if (!*timed)
+      continue;
+    const ProgramReader::Step &step = reader.step();
+    bool idle = step.kind == OperationKind::Idle;
+    for (ResourceId qubit : step.qubits)
+      endWait(qubit, idle ? Attribute() : wish);
+    if (!idle)
+      continue;
+    ResourceId qubit = step.qubits.front();
+    waiting[qubit] = windows.size();
+    windows.push_back(
+        {step.op, reader.site(qubit), step.start, step.duration, wish});
   }
+  for (const Window &window : windows)
+    if (failed(decide(window)))
+      return failure();
   return success();
 }
 

@@ -12,6 +12,7 @@
 
 #include "mlir/IR/SymbolTable.h"
 #include "mlir/IR/Threading.h"
+#include "mlir/Interfaces/FunctionInterfaces.h"
 
 using namespace lull;
 using namespace mlir;
@@ -56,6 +57,17 @@ LogicalResult lull::forEachTimedFunction(
     Remarks remarks;
     LogicalResult result;
   };
+  // W31: time passes in functions only.
+  Operation *stray = nullptr;
+  module.walk<WalkOrder::PreOrder>([&](Operation *op) {
+    if (isa<FunctionOpInterface>(op))
+      return WalkResult::skip();
+    if (isa<TimedOpInterface>(op))
+      stray = op;
+    return stray ? WalkResult::interrupt() : WalkResult::advance();
+  });
+  if (stray)
+    return stray->emitError("is a timed operation outside of any function");
   std::vector<Job> jobs;
   // Nesting changes the manager: before any thread runs.
   for (Operation *function : timedFunctions(module))

@@ -34,6 +34,10 @@ llvm::Expected<Sequence> lull::buildSequence(SequenceOp op) {
     sequence.instants = std::move(*instantsOrError);
   }
   sequence.anchor = anchorOf(sequence.instants);
+  // W10: as many pulses as a sequence of the catalogue may have.
+  if (sequence.size() >= MostPulses)
+    return fault("sequence {} has {} pulses when it may have {}", sequence.name,
+                 sequence.size(), MostPulses - 1);
   llvm::Expected<Net> net = netBySum(sequence.phases);
   if (!net)
     return net.takeError();
@@ -45,7 +49,12 @@ llvm::Expected<Sequence> lull::buildSequence(SequenceOp op) {
                  "(a sequence with an odd number of pulses may be 'closed')",
                  sequence.name, net->str());
   // U10: closed by one pulse.
-  return close(sequence);
+  // Whether it can be closed shows here; it is closed when its repeats are
+  // known, as one of the catalogue is.
+  llvm::Expected<Sequence> closed = close(sequence);
+  if (!closed)
+    return closed.takeError();
+  return sequence;
 }
 
 //===----------------------------------------------------------------------===//

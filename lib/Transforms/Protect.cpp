@@ -29,6 +29,7 @@ void lull::buildProtectPipeline(OpPassManager &manager,
 
   LullScheduleOptions schedule;
   schedule.policy = options.policy;
+  schedule.liveAtStart = options.liveAtStart;
   schedule.spentAtEnd = options.spentAtEnd;
   manager.addPass(createLullSchedule(schedule));
 

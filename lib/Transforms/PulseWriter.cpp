@@ -41,6 +41,12 @@ Value PulseWriter::changeFrame(Location loc, Value qubit, OpenFrame &open,
                                Fraction target, const OperationEntry *entry) {
   // Both are in [0, 2) with denominators of sound phases: the sum fits.
   Fraction change = shortest(*target.minus(open.frame));
+  // W29: a frame change that the program can write.
+  if (!Angle::isSound(change)) {
+    emitError(loc) << "needs a frame change by " << change.str()
+                   << " pi, which goes beyond " << Angle::mostTerm;
+    return {};
+  }
   openFrames += int(!target.isZero()) - int(!open.frame.isZero());
   open.frame = target;
   open.entry = entry;

@@ -41,8 +41,7 @@ public:
   GapWriter(const TimedProgram &program, const WindowStates &states,
             Remarks &remarks)
       : program(program), states(states), remarks(remarks),
-        builder(program.function()->getContext()),
-        protectName(builder.getStringAttr(LullDialect::protectAttrName)) {}
+        builder(program.function()->getContext()) {}
 
   void write(const Gap &gap);
   /// Whether a host could not build an idle and said so.
@@ -62,7 +61,6 @@ private:
   const WindowStates &states;
   Remarks &remarks;
   OpBuilder builder;
-  StringAttr protectName;
   /// The operation that gaps end at, its qubit operands, and the one reached:
   /// the gaps before one operation come in the order of its qubits, and a
   /// barrier may have thousands.
@@ -93,9 +91,6 @@ void GapWriter::writeBefore(TimedOpInterface after, const Gap &gap) {
     return;
   }
   operands[index]->set(next);
-  // The wish for the waits that end here goes along with them.
-  if (Attribute wish = after->getDiscardableAttr(protectName))
-    after->getPrevNode()->setDiscardableAttr(protectName, wish);
 }
 
 void GapWriter::writeAtEnd(const Gap &gap) {
@@ -145,21 +140,18 @@ LogicalResult SchedulePass::makeTight(const Timeline &timeline,
                                       Remarks &remarks) {
   const TimedProgram &program = timeline.read();
   const Problem &problem = program.problem();
-  Schedule alap;
-  const Schedule *chosen = &timeline.schedule();
-  if (policy == SchedulePolicy::ALAP) {
-    if (std::optional<Violation> violation = scheduleAlap(problem, alap)) {
-      report(program, *violation);
-      return failure();
-    }
-    chosen = &alap;
-  }
-  if (failed(report(program, verify(problem, *chosen))))
+  Schedule chosen;
+  if (std::optional<Violation> violation = schedule(problem, policy, chosen)) {
+    report(program, *violation);
     return failure();
-  WindowStates states(program, spentAtEnd);
+  }
+  // The one place where a scheduler is not believed.
+  if (failed(report(program, verify(problem, chosen))))
+    return failure();
+  WindowStates states(program, liveAtStart, spentAtEnd);
   GapWriter writer(program, states, remarks);
   unsigned gaps = 0;
-  forEachGap(problem, *chosen, [&](const Gap &gap) {
+  forEachGap(problem, chosen, [&](const Gap &gap) {
     writer.write(gap);
     ++gaps;
   });

@@ -54,7 +54,7 @@ lull.device @bench clock 1 ns {
 // The wish goes along with the idle that ends at its operation.
 // CHECK: mill.h %0 takes 20
 // CHECK-NEXT: mill.x %1 takes 500
-// CHECK-NEXT: mill.slack %0 takes 480 {lull.protect = "hahn", lull.state = #lull.state<live>}
+// CHECK-NEXT: mill.slack %0 takes 480 {lull.state = #lull.state<live>}
 // CHECK-NEXT: mill.cnot %1 if %0 takes 300 {lull.protect = "hahn"}
 // CHECK-NEXT: return
 // ALAP: mill.slack %0 takes 480 {lull.state = #lull.state<basis>}

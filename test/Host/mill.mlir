@@ -30,7 +30,9 @@
 // CHECK: mill.cnot %[[Q1]] if %[[Q0]] takes 1584
 // CHECK: arith.addf %[[SCALE]], %[[SCALE]] : f64
 // CHECK: memref.alloca() : memref<2xi1>
-// CHECK: mill.slack %[[Q2]] takes 1744
+// Site 2 is handed in, so it may hold a state: its wait is protected.
+// CHECK: mill.wait %[[Q2]] takes
+// CHECK-NEXT: mill.x %[[Q2]] takes 160
 // CHECK: mill.cnot %[[Q1]] if %[[Q2]] takes 1856
 // CHECK: mill.wait %[[Q2]] takes 96
 // CHECK: %[[BIT:.*]] = mill.read %[[Q1]] takes 4000
@@ -57,7 +59,10 @@
 // CHECK-NEXT: mill.prep %[[Q1]] takes 4800
 
 // What waits for the end stands before the terminator.
-// CHECK: mill.slack %[[Q2]] takes 8704 {lull.state = #lull.state<basis>}
+// CHECK: mill.x %[[Q2]] takes 160
+// CHECK: mill.rz(1.5707963267948966) %[[Q2]] takes 0
+// CHECK: mill.rz(1.5707963267948966) %[[Q2]] takes 0
+// CHECK-NEXT: mill.wait %[[Q2]] takes
 // CHECK-NEXT: return %[[BIT]] : i1
 func.func @parity(%scale: f64, %q2: !mill.qubit {lull.site = 2 : i64}) -> i1 {
   %q0 = mill.qubit 0

@@ -46,13 +46,13 @@ lull.device @bench clock 1 ns {
 // CHECK: func.func @f(%[[A:.*]]: !weave.strand {{.*}}, %[[B:.*]]: !weave.strand
 // CHECK: %[[A1:.*]] = weave.apply "h"(%[[A]])
 // CHECK: %[[B1:.*]] = weave.apply "x"(%[[B]])
-// CHECK: %[[A2:.*]] = lull.idle %[[A1]] : !weave.strand -> !weave.strand for 480 dt live {lull.protect = "hahn"}
+// CHECK: %[[A2:.*]] = lull.idle %[[A1]] : !weave.strand -> !weave.strand for 480 dt live
 // CHECK: %[[AB:.*]]:2 = weave.apply "cx"(%[[A2]], %[[B1]])
 // CHECK: %[[B2:.*]] = weave.apply "h"(%[[AB]]#1)
 // CHECK: %[[A3:.*]] = lull.idle %[[AB]]#0 : !weave.strand -> !weave.strand for 20 dt live
 // CHECK-NEXT: return %[[B2]], %[[A3]] :
 // ALAP: func.func @f(%[[A:.*]]: !weave.strand {{.*}}, %[[B:.*]]: !weave.strand
-// ALAP: %[[A1:.*]] = lull.idle %[[A]] : !weave.strand -> !weave.strand for 480 dt basis
+// ALAP: %[[A1:.*]] = lull.idle %[[A]] : !weave.strand -> !weave.strand for 480 dt live
 // ALAP: %[[A2:.*]] = weave.apply "h"(%[[A1]])
 // ALAP: %[[B1:.*]] = weave.apply "x"(%[[B]])
 // ALAP: weave.apply "cx"(%[[A2]], %[[B1]])

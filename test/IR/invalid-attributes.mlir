@@ -19,26 +19,6 @@ func.func @device() attributes {lull.device = @lab::@plain} {
 
 // -----
 
-// A2: a device that is not there
-// expected-error@below {{unknown device @plain}}
-func.func @device() attributes {lull.device = @plain} {
-  return
-}
-
-// -----
-
-// A2: a device out of sight, in the module around this one
-lull.device @plain clock 1 ns {
-}
-module @inner {
-  // expected-error@below {{unknown device @plain}}
-  func.func @device() attributes {lull.device = @plain} {
-    return
-  }
-}
-
-// -----
-
 // A3: a symbol that is no device
 // expected-note@below {{it is this operation}}
 func.func private @helper()
@@ -142,5 +122,33 @@ func.func @site(%q: !lull.qubit {lull.site = -3 : i64}) {
 // A9: an unknown attribute on an argument
 // expected-error@below {{unknown attribute 'lull.device' on argument 1: there is lull.site}}
 func.func @unknown(%c: i1, %q: !lull.qubit {lull.device = @plain}) {
+  return
+}
+
+// -----
+
+// A10: a wish where no wait ends
+// expected-error@below {{'lull.protect' has no effect here: it is for timed operations and for the end of a function}}
+func.func @wish() attributes {lull.protect = "xy8"} {
+  return
+}
+
+// -----
+
+// A11: a plan besides that of an idle
+func.func @plan() {
+  %q0 = lull.qubit 0
+  // expected-error@below {{'lull.plan' has no effect here: it is for idles of other dialects}}
+  lull.idle %q0 for 8 dt live {lull.plan = #lull.plan<"xy8">}
+  return
+}
+
+// -----
+
+// A11: a state on a gate
+func.func @state() {
+  %q0 = lull.qubit 0
+  // expected-error@below {{'lull.state' has no effect here: it is for idles of other dialects}}
+  lull.gate x %q0 {lull.state = #lull.state<live>}
   return
 }

@@ -135,12 +135,15 @@ bool Comparison::checkSite(int site, const ReadProgram &scheduled,
       continue;
     }
     ++tally.windows;
-    // The wish is on the idle or on the operation that ends it.
+    // The wish is on the idle or, if it has none, on the operation that ends
+    // the wait.
     Wish wish;
     if (op.tag >= 0)
       wish = invented.ops[op.tag].wish;
-    else if (i + 1 < before.size() && scheduled.ops[before[i + 1]].tag >= 0)
-      wish = invented.ops[scheduled.ops[before[i + 1]].tag].wish;
+    const ReadOp *end =
+        i + 1 < before.size() ? &scheduled.ops[before[i + 1]] : nullptr;
+    if (wish.sequence.empty() && end && end->tag >= 0 && end->kind != "idle")
+      wish = invented.ops[end->tag].wish;
     Window window{site, op.start, op.duration, {}};
     auto idle = llvm::cast<IdleOp>(op.op);
     llvm::StringRef state = stringifyWindowState(idle.getState());

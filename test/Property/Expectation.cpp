@@ -91,9 +91,13 @@ static Played withRepeats(const Played &base, unsigned repeats,
   for (unsigned block = 0; block < repeats; ++block)
     for (Fraction phase : base.phases)
       phases.push_back(turned(phase, alternating && block % 2 ? 1 : 0));
-  // Unbalanced ones have an even number of pulses: each repeat starts with plus
-  // and adds its share.
-  return {closed(std::move(phases)), base.imbalance};
+  // After an even number of pulses every repeat starts with plus and adds its
+  // share; after an odd number they take turns. What closes the whole is at the
+  // end and adds nothing.
+  double imbalance = base.imbalance;
+  if (base.phases.size() % 2)
+    imbalance = repeats % 2 ? imbalance / repeats : 0;
+  return {closed(std::move(phases)), imbalance};
 }
 
 static std::vector<double> byFormula(llvm::StringRef formula, int count) {
@@ -157,8 +161,8 @@ UserSequence property::inventSequence(Random &random,
       fmt::format("lull.sequence {} phases [{}] at {}{}\n", name,
                   fmt::join(spelled, ", "), at, odd ? " closed" : "");
   sequence.name = std::move(name);
-  // The pulse that closes is at 1, where it changes no sign.
-  sequence.played = {closed(std::move(phases)), imbalanceOf(instants)};
+  // It is closed when its repeats are known.
+  sequence.played = {std::move(phases), imbalanceOf(instants)};
   return sequence;
 }
 
@@ -211,10 +215,18 @@ Played Expectation::played(const Window &window, const Wish &wish) const {
   if (wish.repeats)
     return withRepeats(base, wish.repeats, wish.alternating);
   std::int64_t repeats = options.repeats;
-  if (options.spacing)
-    repeats = std::max<std::int64_t>(
-        1,
-        window.length / (options.spacing * std::int64_t(base.phases.size())));
+  if (options.spacing) {
+    // As often as leaves every pulse, the closing one too, its share.
+    auto pulses = [&](std::int64_t times) {
+      std::int64_t count = times * std::int64_t(base.phases.size());
+      return count % 2 ? count + 1 : count;
+    };
+    repeats = 0;
+    while (pulses(repeats + 1) * options.spacing <= window.length)
+      ++repeats;
+    if (repeats == 0)
+      return {};
+  }
   return withRepeats(base, unsigned(repeats), options.alternating);
 }
 
@@ -228,6 +240,8 @@ Played Expectation::pulses(const Window &window, llvm::StringRef state,
                                 window.length < options.leastWindow))
     return {};
   Played expected = played(window, wish);
+  if (expected.phases.empty())
+    return {};
   std::vector<std::int64_t> widths;
   for (Fraction phase : expected.phases)
     widths.push_back(device.pulseWidth(window.site, phase).value());

@@ -65,7 +65,8 @@ std::optional<std::int64_t> RandomDevice::pulseWidth(int site,
       offer(equatorial, entry.duration);
     if (entry.plays != Entry::Plays::Rotation)
       continue;
-    std::int64_t twice = aligned(entry.duration) + entry.duration;
+    // To the hardware two half turns are two pulses.
+    std::int64_t twice = aligned(entry.duration + gap) + entry.duration;
     bool fits = entry.axis() == phase.modulo(2);
     offer(entry.isHalf() ? anyHalf : any,
           entry.isHalf() ? twice : entry.duration);

@@ -67,15 +67,35 @@ func.func @windows() attributes {lull.device = @line} {
   return
 }
 
-// A spacing that asks for more than any sequence has leaves the window; one
-// beyond 64 bits when multiplied asks for one repeat.
-// RUN: lull-opt %s --lull-assign="sequence=cpmg-64 spacing='288230376151711744 dt'" | FileCheck %s --check-prefix=FAR
+// A spacing that one repeat cannot keep leaves the window, and so does one that
+// asks for more pulses than any sequence has.
+// RUN: lull-opt %s --lull-assign="sequence=cpmg-64 spacing='288230376151711744 dt'" --remarks-filter=lull-assign 2>&1 | FileCheck %s --check-prefix=FAR
 // RUN: lull-opt %s --lull-assign="sequence=cpmg-1 spacing='1 dt'" --remarks-filter=lull-assign 2>&1 | FileCheck %s --check-prefix=CLOSE
-// FAR-LABEL: @long
-// FAR: lull.idle %q0 for 17179869184 dt live plan "cpmg-64"{{$}}
+// FAR: Left {{.*}}left: one repeat of cpmg-64 has its 64 pulses less than 288230376151711744 dt (288230376151711744 ns) apart on average
 // CLOSE: Left {{.*}}left: a spacing of 1 dt (1 ns) asks for 17179869184 repeats of cpmg-1, more than 10000 pulses
 func.func @long() attributes {lull.device = @line} {
   %q0 = lull.qubit 0
   lull.idle %q0 for 17179869184 dt live
   return
+}
+
+// The wish on what ends a wait is for that wait, on the terminator for the waits
+// that last to the end; the wish on an idle itself goes first.
+// CHECK-LABEL: @ends
+func.func @ends() attributes {lull.device = @line} {
+  %q0 = lull.qubit 0
+  %q1 = lull.qubit 1
+  // CHECK: lull.idle %q0 for 2000 dt live plan "xy4"{{$}}
+  // WISHES: @ends
+  // WISHES: lull.idle %q0 for 2000 dt live{{$}}
+  lull.idle %q0 for 2000 dt live
+  // WISHES: lull.idle %q0 for 2000 dt live plan "cpmg-2"
+  lull.idle %q0 for 2000 dt live
+  lull.gate x %q0 for 40 dt {lull.protect = "cpmg-2"}
+  // WISHES: lull.idle %q1 for 2000 dt live plan "hahn" {lull.protect = "hahn"}
+  lull.idle %q1 for 2000 dt live {lull.protect = "hahn"}
+  lull.gate x %q1 for 40 dt {lull.protect = "none"}
+  // WISHES: lull.idle %q1 for 2000 dt live plan @two
+  lull.idle %q1 for 2000 dt live
+  return {lull.protect = @two}
 }

@@ -103,3 +103,19 @@ func.func @branches() attributes {lull.device = @blocks} {
   lull.pulse %q about 0 pi for 40 dt last
   return
 }
+
+// -----
+
+// W29: frame changes of sound phases that do not sum to a sound one
+lull.device @frames clock 1 ns {
+  lull.site 0
+  lull.operation x for 40 dt native plays rotation(1 pi, 0 pi)
+  lull.operation rz for 0 dt native plays frame
+}
+func.func @primes() attributes {lull.device = @frames} {
+  %q = lull.qubit 0
+  lull.pulse %q about 1/999983 pi for 40 dt
+  // expected-error@below {{needs a frame change by -4/999962000357 pi, which goes beyond 1000000000}}
+  lull.pulse %q about 1/999979 pi for 40 dt last
+  return
+}

@@ -187,3 +187,16 @@ func.func @pulse() attributes {lull.device = @bare} {
   lull.idle %q for 4000 dt live
   return
 }
+
+// -----
+
+// W32: the name of a symbol in quotes
+lull.device @one clock 1 ns {
+  lull.site 0
+}
+func.func @wish() attributes {lull.device = @one} {
+  %q = lull.qubit 0
+  // expected-error@below {{the wish "@mine" is a name: the symbol of a sequence is written without quotes}}
+  lull.gate x %q for 40 dt {lull.protect = "@mine"}
+  return
+}

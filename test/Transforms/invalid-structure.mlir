@@ -201,9 +201,9 @@ lull.device @line clock 1 ns step 4 dt gap 2 dt {
 }
 func.func @region(%c: i1) attributes {lull.device = @line} {
   %q = lull.qubit 0
-  // expected-error@below {{timed operations in a region cannot be scheduled yet}}
+  // expected-error@below {{operations on qubits in a region cannot be scheduled yet}}
   scf.if %c {
-    // expected-note@below {{a timed operation is here}}
+    // expected-note@below {{an operation on a qubit is here}}
     lull.gate x %q for 40 dt
   }
   return
@@ -286,9 +286,61 @@ module {
 
 // -----
 
-// W7: timed operations that are in no function
-// expected-warning@below {{lull-schedule found no function with timed operations here}}
+// W31: timed operations that are in no function
 module {
   %q = lull.qubit 0
+  // expected-error@below {{is a timed operation outside of any function}}
   lull.gate x %q for 40 dt
+}
+
+// -----
+
+// A2: a device that is not there
+// expected-error@below {{unknown device @plain}}
+func.func @device() attributes {lull.device = @plain} {
+  %q = lull.qubit 0
+  lull.gate x %q for 40 dt
+  return
+}
+
+// -----
+
+// W3: a qubit that something else takes in a region
+lull.device @line clock 1 ns {
+  lull.site 0
+}
+func.func private @unknown(!lull.qubit)
+func.func @region(%c: i1) attributes {lull.device = @line} {
+  %q = lull.qubit 0
+  lull.gate x %q for 40 dt
+  // expected-error@below {{operations on qubits in a region cannot be scheduled yet}}
+  scf.if %c {
+    // expected-note@below {{an operation on a qubit is here}}
+    func.call @unknown(%q) : (!lull.qubit) -> ()
+  }
+  return
+}
+
+// -----
+
+// W30: a call that takes time, behind another function
+lull.device @line clock 1 ns {
+  lull.site 0
+}
+func.func @inner() attributes {lull.device = @line} {
+  %q = lull.qubit 0
+  // expected-note@below {{a timed operation is here}}
+  lull.gate x %q for 40 dt
+  return
+}
+func.func @between() {
+  func.call @inner() : () -> ()
+  return
+}
+func.func @outer() attributes {lull.device = @line} {
+  %q = lull.qubit 0
+  lull.gate x %q for 40 dt
+  // expected-error@below {{calls a function with timed operations, which cannot be scheduled yet}}
+  func.call @between() : () -> ()
+  return
 }

@@ -27,3 +27,20 @@ func.func @parity() {
   lull.barrier %q0, %q1
   return
 }
+
+// A module within sees the devices around it.
+lull.device @around clock 1 ns {
+  lull.site 0
+  lull.site 1
+}
+module @inner {
+  // CHECK-LABEL: func.func @within
+  // CHECK: lull.idle %q1 for 40 dt basis
+  func.func @within() attributes {lull.device = @around} {
+    %q0 = lull.qubit 0
+    %q1 = lull.qubit 1
+    lull.delay %q0 for 40 ns
+    lull.barrier %q0, %q1
+    return
+  }
+}

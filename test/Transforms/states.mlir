@@ -1,5 +1,6 @@
 // RUN: lull-opt %s --lull-schedule | FileCheck %s
 // RUN: lull-opt %s --lull-schedule=spent-at-end | FileCheck %s --check-prefix=SPENT
+// RUN: lull-opt %s --lull-schedule=live-at-start | FileCheck %s --check-prefix=START
 
 // What waiting qubits hold: a dataflow over what gates do to basis states and
 // to Z errors (docs/Spec.md). Site 0 keeps the others waiting.
@@ -153,5 +154,53 @@ func.func @spent_through_cx() attributes {lull.device = @line} {
   lull.gate cx %q2, %q1 for 10 dt
   %m1 = lull.measure %q1 for 20 dt
   %m2 = lull.measure %q2 for 20 dt
+  return
+}
+
+// A qubit that the function receives may hold a state, until it is reset.
+// CHECK-LABEL: @handed_in
+// CHECK: lull.idle %arg0 for 100 dt live
+func.func @handed_in(%d: !lull.qubit {lull.site = 1 : i64}) attributes {lull.device = @line} {
+  %q0 = lull.qubit 0
+  lull.delay %q0 for 100 dt
+  lull.barrier %q0, %d
+  return
+}
+
+// CHECK-LABEL: @handed_in_to_be_reset
+// CHECK: lull.idle %arg0 for 100 dt spent
+// CHECK: lull.reset
+// CHECK: lull.idle %arg0 for 100 dt basis
+func.func @handed_in_to_be_reset(%d: !lull.qubit {lull.site = 1 : i64}) attributes {lull.device = @line} {
+  %q0 = lull.qubit 0
+  lull.delay %q0 for 100 dt
+  lull.barrier %q0, %d
+  lull.reset %d for 10 dt
+  lull.delay %q0 for 110 dt
+  lull.barrier %q0, %d
+  return
+}
+
+// What the device says that an operation plays goes before its name.
+lull.device @odd clock 1 ns {
+  lull.site 0
+  lull.site 1
+  lull.site 2
+  lull.operation x for 10 dt plays rotation(1/2 pi, 0 pi)
+  lull.operation flip for 10 dt plays rotation(1 pi, 1/3 pi)
+}
+// CHECK-LABEL: @plays
+// CHECK: lull.idle %q1 for 90 dt live
+// CHECK: lull.idle %q2 for 90 dt basis
+// START-LABEL: @plays
+// START: lull.idle %q2 for 90 dt live
+func.func @plays() attributes {lull.device = @odd} {
+  %q0 = lull.qubit 0
+  %q1 = lull.qubit 1
+  %q2 = lull.qubit 2
+  lull.delay %q0 for 100 dt
+  lull.gate x %q1 for 10 dt
+  lull.gate flip %q2 for 10 dt
+  lull.barrier %q0, %q1, %q2
   return
 }

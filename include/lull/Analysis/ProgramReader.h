@@ -36,7 +36,7 @@ public:
   /// The one block of the function; fails if there are more.
   mlir::FailureOr<mlir::Block *> body();
 
-  /// Fails if there is a timed operation in a region of `op`.
+  /// Fails if there is an operation on a qubit in a region of `op`.
   static llvm::LogicalResult requireUntimed(mlir::Operation *op);
 
   /// Fails if an idle or a pulse is on another number of qubits than one.
@@ -63,8 +63,8 @@ public:
   SiteId site(ResourceId qubit) const { return sites[qubit]; }
   /// The value that stands for the qubit now.
   mlir::Value value(ResourceId qubit) const { return values[qubit]; }
-  /// When the qubit is free.
-  Ticks clock(ResourceId qubit) const { return clocks[qubit]; }
+  /// Whether the function receives the qubit as an argument.
+  bool isHandedIn(ResourceId qubit) const { return handedIn[qubit]; }
 
   /// Says that `to` stands for the qubit from here on and `from` no longer
   /// does, since the caller has replaced the operation that was read last.
@@ -73,6 +73,8 @@ public:
 private:
   llvm::LogicalResult readTimed(TimedOpInterface op);
   llvm::LogicalResult readOther(mlir::Operation *op);
+  /// Fails if `op` calls, by whatever way, a function with timed operations.
+  llvm::LogicalResult requireUntimedCalls(mlir::Operation *op);
   /// Notes classical values that depend on what timed operations give, and
   /// fails if a timed operation takes one.
   llvm::LogicalResult followOutcomes(mlir::Operation *op);
@@ -85,9 +87,13 @@ private:
   std::vector<SiteId> sites;
   std::vector<mlir::Value> values;
   std::vector<Ticks> clocks;
+  std::vector<bool> handedIn;
   llvm::DenseMap<mlir::Value, ResourceId> byValue;
   llvm::DenseMap<SiteId, ResourceId> bySite;
+  /// Classical values that depend on what timed operations gave.
   llvm::DenseSet<mlir::Value> outcomes;
+  /// Functions that are called and have been looked at.
+  llvm::DenseSet<mlir::Operation *> callees;
   /// The last type looked at and whether it is a qubit: types come in runs.
   mlir::Type lastType;
   bool lastIsQubit = false;

@@ -36,6 +36,8 @@ public:
   TimedOpInterface op(OpId id) const { return ops[id]; }
   /// The site of a qubit.
   SiteId site(ResourceId qubit) const { return sites[qubit]; }
+  /// Whether the function receives the qubit as an argument.
+  bool isHandedIn(ResourceId qubit) const { return handedIn[qubit]; }
   /// The value that stands for the qubit at the end of the function.
   mlir::Value lastValue(ResourceId qubit) const { return last[qubit]; }
 
@@ -45,6 +47,7 @@ private:
   Problem input;
   std::vector<TimedOpInterface> ops;
   std::vector<SiteId> sites;
+  std::vector<bool> handedIn;
   std::vector<mlir::Value> last;
 };
 

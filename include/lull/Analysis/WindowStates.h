@@ -30,14 +30,18 @@ enum class BasisAction : std::uint8_t {
   Exchange,
 };
 BasisAction basisAction(llvm::StringRef gate);
+/// The same by what the device says that the operation plays; Unknown for
+/// Action::Kind::None too, where the name must tell.
+BasisAction basisAction(const Action &plays);
 
 /// What each qubit holds just before each operation on it and at the end, by a
 /// dataflow over the whole function: forward whether it is in a basis state,
-/// backward whether it will only be measured or reset. Qubits start in a basis
-/// state and, at the end, are still wanted unless `spentAtEnd`.
+/// backward whether it will only be measured or reset. At the start qubits are
+/// in a basis state, except those that the function receives, or all of them if
+/// `liveAtStart`; at the end they are still wanted, unless `spentAtEnd`.
 class WindowStates {
 public:
-  WindowStates(const TimedProgram &program, bool spentAtEnd);
+  WindowStates(const TimedProgram &program, bool liveAtStart, bool spentAtEnd);
 
   /// What the `index`-th qubit of operation `after` holds while it waits for
   /// that operation.
@@ -53,7 +57,8 @@ private:
     bool spent : 1;
   };
   static WindowState stateOf(Facts facts);
-  void forward();
+  BasisAction actionOf(OpId id) const;
+  void forward(bool liveAtStart);
   void backward(bool spentAtEnd);
 
   const TimedProgram &program;

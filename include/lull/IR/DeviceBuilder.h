@@ -25,6 +25,10 @@ mlir::FailureOr<Device> buildDevice(DeviceOp op, bool quiet = false);
 mlir::Operation *deviceHolder(mlir::Operation *op,
                               mlir::FlatSymbolRefAttr &symbol);
 
+/// The device that a symbol means at `holder`: looked up in the symbol tables
+/// around it, the nearest first. Null if there is none.
+DeviceOp resolveDevice(mlir::Operation *holder, mlir::FlatSymbolRefAttr symbol);
+
 /// Whether a device can run what a function says: sites exist, pairs are
 /// coupled, durations are on the clock. Emits an error at each operation that
 /// breaks it, up to a few.

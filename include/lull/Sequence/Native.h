@@ -30,7 +30,8 @@ namespace lull {
 struct NativePulse {
   /// The entry that makes the rotation: one pi pulse or two half turns.
   const OperationEntry *entry = nullptr;
-  /// One or two; two half turns start `second` ticks apart.
+  /// One or two; two half turns start `second` ticks apart, on the grid and
+  /// with the least gap between them.
   unsigned count = 1;
   Ticks second = 0;
   /// From the start of the first to the end of the last, in ticks.

@@ -37,6 +37,10 @@
 
 namespace lull {
 
+/// The longest window in which pulses are placed, in ticks: positions in it are
+/// exact in a double as well.
+inline constexpr Ticks LongestWindow = Ticks(1) << 53;
+
 /// A window and the grid it lies on, in ticks.
 struct GridWindow {
   /// Absolute start; only its remainder by `step` matters.

@@ -141,6 +141,10 @@ public:
   struct NamedEntries;
   const NamedEntries *named(llvm::StringRef name) const;
 
+  /// The names of one-qubit operations that play something, in the order in
+  /// which the device first lists one that does.
+  llvm::ArrayRef<const NamedEntries *> playing() const { return playingNames; }
+
   /// The entry for these sites in this order: the one that lists them, else the
   /// one for any site, any coupled pair, or any three and more distinct sites;
   /// nullptr if there is none. A lookup in hash tables.
@@ -171,6 +175,7 @@ private:
   llvm::DenseMap<std::pair<SiteId, SiteId>, unsigned> couplerIndex;
   std::vector<std::unique_ptr<OperationEntry>> entries;
   llvm::StringMap<std::unique_ptr<NamedEntries>> byName;
+  std::vector<const NamedEntries *> playingNames;
 };
 
 } // namespace lull

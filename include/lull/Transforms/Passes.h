@@ -41,6 +41,10 @@ struct ProtectOptions : mlir::PassPipelineOptions<ProtectOptions> {
       llvm::cl::values(
           clEnumValN(SchedulePolicy::ASAP, "asap", "as soon as possible"),
           clEnumValN(SchedulePolicy::ALAP, "alap", "as late as possible"))};
+  Option<bool> liveAtStart{
+      *this, "live-at-start",
+      llvm::cl::desc("Qubits hold states that matter when the function starts"),
+      llvm::cl::init(false)};
   Option<bool> spentAtEnd{
       *this, "spent-at-end",
       llvm::cl::desc("Qubits are not used after the function ends"),

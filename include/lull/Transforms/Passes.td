@@ -71,6 +71,8 @@ def LullSchedule : Lull_Pass<"lull-schedule"> {
                         "as soon as possible"),
              clEnumValN(::lull::SchedulePolicy::ALAP, "alap",
                         "as late as possible"))}]>,
+    Option<"liveAtStart", "live-at-start", "bool", "false",
+           "Qubits hold states that matter when the function starts">,
     Option<"spentAtEnd", "spent-at-end", "bool", "false",
            "Qubits are not used after the function ends">,
   ];
@@ -81,7 +83,8 @@ def LullAssign : Lull_Pass<"lull-assign"> {
   let description = [{
     Decides for each idle: leave it, or a sequence with its repeats. A plan that
     is on an idle stays; next goes the user's wish (`lull.protect` on the idle
-    or on the operation that ends it); then the sequence of the option, for
+    or on the operation that ends it; on
+    the terminator, for the waits that last to the end); then the sequence of the option, for
     windows that are live, long enough and hold its pulses on the grid. A remark
     says why a window is left.
 

@@ -20,8 +20,8 @@
 
 namespace lull {
 
-/// The plain sequence of a `lull.sequence` op, closed if it asks for that.
-/// Fails if it is not the identity.
+/// The plain sequence of a `lull.sequence` op, before it is closed if it asks
+/// for that. Fails if it is neither the identity nor can be closed.
 llvm::Expected<Sequence> buildSequence(SequenceOp op);
 
 /// A plan on sites that play its pulses alike: what is played, how wide the
