@@ -9,8 +9,9 @@
 // The tree of a program as it was written: names are not resolved, nothing is
 // evaluated. It lives in an arena, is never changed after parsing, and points
 // into the source buffer; a null pointer stands for a part that was left out.
-// Its nodes are told apart with llvm::isa, cast and dyn_cast. No tree is nested
-// deeper than MostLevels, so it may be walked by recursion.
+// Its nodes are told apart with llvm::isa, cast and dyn_cast. No text nested
+// deeper than MostLevels becomes a tree, and each level adds a dozen nodes to
+// its height at most (one for each precedence): it may be walked by recursion.
 //
 // Versions 2.0 and 3 share the tree: `qreg q[2]` and `qubit[2] q` are the same
 // declaration, `a ^ b` is a power in the one and an exclusive or in the other.
